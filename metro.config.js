@@ -1,0 +1,47 @@
+// Metro bundles the web client. Three things differ from Expo's defaults: folders that never belong to the
+// client are out of its sight, zod's fifty languages are replaced by the one the product speaks, and in
+// development /api goes to the server, so that cookies stay same-origin.
+const http = require('node:http');
+const path = require('node:path');
+const { getDefaultConfig } = require('expo/metro-config');
+
+const root = __dirname;
+const config = getDefaultConfig(root);
+
+const escaped = (text) => text.replace(/[.*+?^${}()|[\]\\/]/g, '\\$&');
+const outside = ['server', 'tests', 'scripts', 'build', 'dist', '.data', 'docs', 'coverage']
+  .map((folder) => new RegExp(`^${escaped(path.join(root, folder) + path.sep)}`));
+config.resolver.blockList = [].concat(config.resolver.blockList ?? [], outside);
+
+const zodLocales = path.join(root, 'node_modules', 'zod', 'v4', 'locales') + path.sep;
+const resolveBefore = config.resolver.resolveRequest;
+config.resolver.resolveRequest = (context, name, platform) => {
+  const resolve = resolveBefore ?? context.resolveRequest;
+  const found = resolve(context, name, platform);
+  if (found.type === 'sourceFile' && found.filePath === `${zodLocales}index.js`) {
+    return { type: 'sourceFile', filePath: path.join(root, 'assets', 'bundle', 'zodLocales.js') };
+  }
+  return found;
+};
+
+/** Forwards /api to the server of `npm run dev`. */
+function forwardApi(request, response) {
+  const upstream = http.request(
+    { host: '127.0.0.1', port: Number(process.env.API_PORT ?? 4300), path: request.url, method: request.method, headers: request.headers },
+    (answer) => {
+      response.writeHead(answer.statusCode ?? 502, answer.headers);
+      answer.pipe(response);
+    },
+  );
+  upstream.on('error', () => {
+    if (response.headersSent) return response.destroy();
+    response.writeHead(503, { 'content-type': 'application/problem+json' });
+    response.end(JSON.stringify({ type: 'about:blank', title: 'The server is not up yet.', status: 503 }));
+  });
+  request.pipe(upstream);
+}
+
+config.server.enhanceMiddleware = (metro) => (request, response, next) =>
+  /^\/api(\/|\?|$)/.test(request.url ?? '') ? forwardApi(request, response) : metro(request, response, next);
+
+module.exports = config;
