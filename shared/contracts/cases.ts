@@ -124,7 +124,8 @@ export const revisionResponse = z.object({ number: z.number().int(), by: person,
 export const compareResponse = z.object({ from: z.number().int(), to: z.number().int(), changes: z.array(fieldChange) });
 export const eventsResponse = z.object({ events: z.array(caseEvent) });
 
-/** POST /api/cases/:caseId/attachments: the bytes as the body, name in `X-File-Name` (percent-encoded). GET /api/attachments/:id returns them. */
+/** POST /api/cases/:caseId/attachments: the bytes as the body, always sent as `Content-Type: application/octet-stream`
+ * (a form of another site cannot send that; the server finds the real type itself), name in `X-File-Name` (percent-encoded). GET /api/attachments/:id returns them. */
 export const attachmentResponse = attachment;
 export const doneResponse = done;
 

@@ -3,6 +3,13 @@ import { z } from 'zod';
 import { LIMITS } from '../limits';
 import { day, email, id, password, projectRole, siteRole, text } from './common';
 
+/*
+ * Who is asking. Every call below answers `sessionResponse` unless it says `done`:
+ * GET /api/session · POST /api/session (signInRequest) · DELETE /api/session (sign out) · POST /api/session/end-all {} (sign out everywhere)
+ * PUT /api/account/name (changeNameRequest) · PUT /api/account/password (changePasswordRequest; ends all other sessions)
+ * POST /api/password/forgot (forgotPasswordRequest; done, the same for every address) · POST /api/password/reset (resetPasswordRequest; done)
+ * GET /api/invitations/:token (invitationView) · POST /api/invitations/:token/accept (acceptInvitationRequest; signs in)
+ */
 /** GET /api/session: who is asking, and what the shell needs. `user` null = nobody signed in. Never cached. */
 export const sessionResponse = z.object({
   user: z.object({

@@ -12,6 +12,12 @@ export const project = z.object({
   peerReview: z.boolean(), caseCount: z.number().int(), yourRole: projectRole.nullable(), may, isDemo: z.boolean(),
 });
 
+/*
+ * GET /api/team · POST /api/projects (createProjectRequest; projectResponse) · GET /api/projects/:projectId · PUT /api/projects/:projectId (changeProjectRequest)
+ * POST /api/projects/:projectId/invitations (inviteRequest) · DELETE /api/projects/:projectId/invitations/:invitationId
+ * PUT /api/projects/:projectId/members/:userId (changeMemberRequest) · DELETE the same. PUT and POST answer projectResponse, DELETE answers `done`
+ * GET /api/admin/users · PUT /api/admin/users/:userId (changeUserRequest): both answer adminUsersResponse · GET /api/mailbox
+ */
 /** GET /api/team */
 export const teamResponse = z.object({ projects: z.array(project), mayCreateProject: z.boolean(), mayAdminister: z.boolean() });
 /** GET /api/projects/:projectId */
