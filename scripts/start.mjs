@@ -21,8 +21,7 @@ try {
   await claimPort(port);
   if (db.ownerUrl) await migrate({ dataDir, db, external });
   await loadDemo({ dataDir, db, external });
-  const server = await startServer({ port, env: serverEnv({ dataDir, appUrl: db.appUrl, port }) });
-  toStop.push(server.stop);
+  const server = await startServer({ port, env: serverEnv({ dataDir, appUrl: db.appUrl, port }), onSpawn: (stop) => toStop.push(stop) });
   const address = process.env.PUBLIC_URL || `http://localhost:${port}`;
   db.note?.({ address });
   process.stdout.write(`Throughbond is ready at ${address} (Ctrl-C stops it)\n`);

@@ -54,11 +54,11 @@ export async function loadDemo({ dataDir, db, external = false, demo = process.e
 
 /**
  * Starts a server process and waits until /api/health answers.
- * @param {{ env: NodeJS.ProcessEnv, port: number, args?: string[], quiet?: boolean }} options
- *   args: how node starts it, default the built server; quiet: keep its lines, show them only if it fails
+ * @param {{ env: NodeJS.ProcessEnv, port: number, args?: string[], quiet?: boolean, onSpawn?: (stop: () => Promise<void>) => void }} options
+ *   args: how node starts it, default the built server; quiet: keep its lines, show them only if it fails; onSpawn: gets the way to stop it as soon as it exists
  * @returns {Promise<{ child: import('node:child_process').ChildProcess, ended: Promise<number>, stop: () => Promise<void>, output: () => string }>}
  */
-export async function startServer({ env, port, args = [builtServer()], quiet = false }) {
+export async function startServer({ env, port, args = [builtServer()], quiet = false, onSpawn }) {
   const follow = inRoot('scripts', 'lib', 'followParent.mjs');
   const child = spawn(process.execPath, ['--import', follow, ...args], {
     cwd: root, env, detached: true, // its own group: Ctrl-C reaches it in our order, before the database
@@ -79,6 +79,7 @@ export async function startServer({ env, port, args = [builtServer()], quiet = f
     if (late) child.kill('SIGKILL');
     await ended;
   };
+  onSpawn?.(stop);
   for (const until = Date.now() + 60_000; ;) {
     if (over) throw new SetupError(quiet ? `The server ended at its start:\n${tail(output)}` : 'The server ended at its start; its own lines above say why.');
     if (Date.now() > until) {

@@ -2,6 +2,7 @@
 const LIGHT = { measured: '#1D4F91', calculated: '#0B6B5D', judged: '#9C3D12', ink: '#1C2430' };
 const DARK = { measured: '#8DB4EA', calculated: '#6CC7B4', judged: '#F0A27C', ink: '#ECE7DC' };
 const GROUND = { light: '#F7F4EC', dark: '#14181F' };
+const BOX = '0 0 32.4 32.4'; // the heavier cut reaches a fifth of a unit over the square
 
 function parts({ small, paint }) {
   const square = small ? 4.8 : 4.2;
@@ -18,14 +19,14 @@ const paintWith = (inks) => (ink, attribute) => `${attribute}="${inks[ink]}"`;
 
 /** The sign on a clear ground, in the inks of the light theme. */
 export function signSvg({ small = false, inks = LIGHT } = {}) {
-  return `<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 32 32" width="32" height="32">${parts({ small, paint: paintWith(inks) })}</svg>`;
+  return `<svg xmlns="http://www.w3.org/2000/svg" viewBox="${small ? BOX : '0 0 32 32'}" width="32" height="32">${parts({ small, paint: paintWith(inks) })}</svg>`;
 }
 
 /** The tab's icon: the heavier cut, in the inks of the browser's theme. */
 function faviconSvg() {
   const rule = (inks) => Object.entries(inks).map(([name, colour]) => `.f-${name}{fill:${colour}}.s-${name}{stroke:${colour}}`).join('');
   const paint = (ink, attribute) => `class="${attribute === 'fill' ? 'f' : 's'}-${ink}"`;
-  return `<svg xmlns="http://www.w3.org/2000/svg" viewBox="0 0 32 32" width="32" height="32"><style>${rule(LIGHT)}@media (prefers-color-scheme:dark){${rule(DARK)}}</style>${parts({ small: true, paint })}</svg>`;
+  return `<svg xmlns="http://www.w3.org/2000/svg" viewBox="${BOX}" width="32" height="32"><style>${rule(LIGHT)}@media (prefers-color-scheme:dark){${rule(DARK)}}</style>${parts({ small: true, paint })}</svg>`;
 }
 
 /** The sign on ink; `share` is the part of the width it takes, `round` the corner's part of it. */
