@@ -1,0 +1,5 @@
+import { AdminScreen } from '@/components/admin/AdminScreen';
+
+export default function Route() {
+  return <AdminScreen />;
+}

@@ -1,0 +1,5 @@
+import { CasesScreen } from '@/components/cases/CasesScreen';
+
+export default function Route() {
+  return <CasesScreen />;
+}

@@ -1,0 +1,5 @@
+import { NewCaseScreen } from '@/components/cases/NewCaseScreen';
+
+export default function Route() {
+  return <NewCaseScreen />;
+}

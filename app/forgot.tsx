@@ -1,0 +1,5 @@
+import { ForgotScreen } from '@/components/auth/ForgotScreen';
+
+export default function Route() {
+  return <ForgotScreen />;
+}

@@ -1,0 +1,5 @@
+import { GlossaryScreen } from '@/components/help/GlossaryScreen';
+
+export default function Route() {
+  return <GlossaryScreen />;
+}

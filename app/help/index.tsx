@@ -1,0 +1,5 @@
+import { HelpScreen } from '@/components/help/HelpScreen';
+
+export default function Route() {
+  return <HelpScreen />;
+}

@@ -1,0 +1,5 @@
+import { QuickLookScreen } from '@/components/quick/QuickLookScreen';
+
+export default function Route() {
+  return <QuickLookScreen />;
+}

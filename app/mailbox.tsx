@@ -1,0 +1,5 @@
+import { MailboxScreen } from '@/components/mailbox/MailboxScreen';
+
+export default function Route() {
+  return <MailboxScreen />;
+}

@@ -1,0 +1,5 @@
+import { RelationsScreen } from '@/components/relations/RelationsScreen';
+
+export default function Route() {
+  return <RelationsScreen />;
+}

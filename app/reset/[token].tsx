@@ -1,0 +1,8 @@
+import { useLocalSearchParams } from 'expo-router';
+
+import { ResetScreen } from '@/components/auth/ResetScreen';
+
+export default function Route() {
+  const { token } = useLocalSearchParams<{ token: string }>();
+  return <ResetScreen token={token} />;
+}

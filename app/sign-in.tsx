@@ -1,0 +1,5 @@
+import { SignInScreen } from '@/components/auth/SignInScreen';
+
+export default function Route() {
+  return <SignInScreen />;
+}
