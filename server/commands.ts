@@ -1,0 +1,50 @@
+import { parseArgs } from 'node:util';
+
+import { createAdministrator } from './auth/firstAdministrator';
+import type { Passwords } from './auth/passwords';
+import { migrate } from './db/migrator';
+import { neededDatabaseUrl, SettingError, type Env } from './env';
+import type { Log } from './http/log';
+import { serve } from './start';
+
+interface Setting {
+  env: Env;
+  log: Log;
+  passwords: Passwords;
+}
+
+const USAGE = 'Commands: serve (default) | migrate | demo load|reset|remove | admin create --email A --name N --password P';
+const say = (sentence: string) => console.error(sentence);
+
+/** Waits for the end: Ctrl-C, a service manager's SIGTERM. A second signal ends at once. */
+async function serveUntilStopped({ env, log, passwords }: Setting): Promise<void> {
+  const running = await serve(env, log, passwords);
+  await new Promise<void>((resolve) => {
+    for (const signal of ['SIGTERM', 'SIGINT'] as const) process.once(signal, () => resolve());
+  });
+  await running.stop();
+}
+
+async function runMigrate({ env, passwords }: Setting): Promise<void> {
+  const owner = env.databaseOwnerUrl ?? neededDatabaseUrl(env);
+  const { ran, separateUser } = await migrate({ owner, app: env.databaseUrl });
+  say(ran.length === 0 ? 'The database schema is current.' : `The database schema is current; ${ran.length} migrations ran.`);
+  if (!separateUser) say('One database user owns and uses the tables, so a signed case is guarded by triggers alone; set DATABASE_OWNER_URL to a user of its own for the full guard.');
+  await passwords.close();
+}
+
+async function runAdmin({ env, passwords }: Setting, args: string[]): Promise<void> {
+  const { values } = parseArgs({ args, options: { email: { type: 'string' }, name: { type: 'string' }, password: { type: 'string' } } });
+  const made = await createAdministrator(neededDatabaseUrl(env), passwords, { email: values.email ?? '', name: values.name ?? '', password: values.password ?? '' });
+  say(made);
+  await passwords.close();
+}
+
+/** Runs one command of the server to its end. @throws SettingError for a command or setting that cannot be used */
+export async function runCommand(args: readonly string[], setting: Setting): Promise<void> {
+  const [command = 'serve', act, ...rest] = args;
+  if (command === 'serve') return serveUntilStopped(setting);
+  if (command === 'migrate') return runMigrate(setting);
+  if (command === 'admin' && act === 'create') return runAdmin(setting, rest);
+  throw new SettingError(`There is no command "${[command, act].filter(Boolean).join(' ')}". ${USAGE}`);
+}

@@ -1,0 +1,62 @@
+import { createTransport, type Transport } from 'nodemailer';
+
+import type { Log } from '@/server/http/log';
+
+/** A mail in plain text. */
+export interface Letter {
+  to: string;
+  subject: string;
+  text: string;
+}
+
+export interface Mailer {
+  /** Sends now and fails loudly. */
+  send: (letter: Letter) => Promise<void>;
+  /** Sends in the background: the person who caused it need not wait, and learns nothing from the time it takes. */
+  post: (letter: Letter) => void;
+  /** Waits for what is under way. */
+  settled: () => Promise<void>;
+}
+
+type Send = Mailer['send'];
+
+/** Real delivery by SMTP. */
+export function smtpSender(smtpUrl: string, from: string): Send {
+  const transport = createTransport(smtpUrl, { from });
+  return async (letter) => {
+    await transport.sendMail(letter);
+  };
+}
+
+/** No mail server: nodemailer builds the mail all the same and hands it to `keep` in place of the network. */
+export function localSender(from: string, keep: (letter: Letter) => Promise<void>): Send {
+  const transport: Transport<null> = {
+    name: 'local mailbox',
+    version: '1',
+    send: (mail, done) => {
+      const { to, subject, text } = mail.data;
+      keep({ to: String(to), subject: String(subject), text: String(text) }).then(
+        () => done(null, null),
+        (error: unknown) => done(error instanceof Error ? error : new Error('The mail could not be kept.'), null),
+      );
+    },
+  };
+  const mailer = createTransport(transport, { from });
+  return async (letter) => {
+    await mailer.sendMail(letter);
+  };
+}
+
+export function createMailer(send: Send, log: Log): Mailer {
+  const underWay = new Set<Promise<void>>();
+  return {
+    send,
+    post: (letter) => {
+      const sending = send(letter).catch((error: unknown) => log.error('mail-failed', error)).finally(() => underWay.delete(sending));
+      underWay.add(sending);
+    },
+    settled: async () => {
+      await Promise.all(underWay);
+    },
+  };
+}

@@ -1,0 +1,88 @@
+import { randomUUID } from 'node:crypto';
+import { existsSync } from 'node:fs';
+import { createServer, type Server } from 'node:http';
+import type { AddressInfo } from 'node:net';
+import path from 'node:path';
+
+import { createApp } from './app';
+import type { Passwords } from './auth/passwords';
+import { createSessions } from './auth/sessions';
+import { sessionSecret } from './auth/sessionSecret';
+import { createThrottle } from './auth/throttle';
+import { defineModels } from './db/models';
+import { missingMigrations } from './db/migrator';
+import { openDatabase } from './db/sequelize';
+import type { Deps } from './deps';
+import { neededDatabaseUrl, SettingError, type Env } from './env';
+import type { Log } from './http/log';
+import { keepLetter } from './mail/mailbox';
+import { createMailer, localSender, smtpSender } from './mail/mailer';
+
+/** Everything the server works with, from its settings; nothing listens yet. */
+export function makeDeps(env: Env, log: Log, passwords: Passwords): Deps {
+  const db = openDatabase(neededDatabaseUrl(env));
+  defineModels(db);
+  const now = () => new Date();
+  const newId = randomUUID;
+  const keep = keepLetter({ db, now, newId });
+  const send = env.smtpUrl ? smtpSender(env.smtpUrl, env.mailFrom) : localSender(env.mailFrom, keep);
+  return {
+    env, db, log, now, newId, passwords,
+    throttle: createThrottle({ db, now }),
+    sessions: createSessions({ db, secret: sessionSecret(env.dataDir), now }),
+    mail: createMailer(send, log),
+    engineVersion: 'none',
+    reviewsWaiting: () => Promise.resolve(0),
+  };
+}
+
+/** @throws SettingError in one sentence when the schema is older than this server */
+export async function checkSchema(deps: Deps): Promise<void> {
+  const missing = await missingMigrations(deps.db);
+  const [first, ...more] = missing;
+  if (first === undefined) return;
+  const others = more.length === 0 ? '' : ` and ${more.length} more`;
+  throw new SettingError(`The database lacks the migration ${first}${others}; run the server's "migrate" with DATABASE_OWNER_URL set to the user who owns the tables.`);
+}
+
+/** Listens, and resolves once it does. @throws SettingError when the port is taken */
+async function listen(server: Server, port: number): Promise<number> {
+  await new Promise<void>((resolve, reject) => {
+    server.once('error', (error: NodeJS.ErrnoException) => {
+      reject(error.code === 'EADDRINUSE' ? new SettingError(`Port ${port} is in use; set PORT to a free one.`) : error);
+    });
+    server.listen(port, resolve);
+  });
+  return (server.address() as AddressInfo).port;
+}
+
+export interface Running {
+  port: number;
+  stop: () => Promise<void>;
+}
+
+/** Starts the whole product; `stop` lets answers under way finish for half a second, then ends. */
+export async function serve(env: Env, log: Log, passwords: Passwords): Promise<Running> {
+  const deps = makeDeps(env, log, passwords);
+  await checkSchema(deps);
+  const built = existsSync(path.join(env.distDir, 'index.html'));
+  if (!built) log.info('client-not-built');
+  const server = createServer(createApp(deps, { distDir: built ? env.distDir : null }));
+  const port = await listen(server, env.port);
+  log.info('listening', { port });
+  return {
+    port,
+    stop: async () => {
+      const closed = new Promise<void>((resolve) => server.close(() => resolve()));
+      server.closeIdleConnections();
+      const cut = setTimeout(() => server.closeAllConnections(), 500);
+      await closed;
+      clearTimeout(cut);
+      deps.sessions.stop();
+      await Promise.race([deps.mail.settled(), new Promise((resolve) => setTimeout(resolve, 300).unref())]);
+      await passwords.close();
+      await deps.db.close();
+      log.flush();
+    },
+  };
+}
