@@ -1,4 +1,4 @@
-import { QueryClient } from '@tanstack/react-query';
+import type { DefaultOptions } from '@tanstack/react-query';
 
 import { ApiProblem } from './problems';
 
@@ -8,11 +8,8 @@ export const shouldRetry = (failures: number, error: unknown): boolean =>
 
 export const STALE = { never: Infinity, minute: 60_000, always: 0 } as const;
 
-export const createQueryClient = () =>
-  new QueryClient({
-    defaultOptions: {
-      // the browser's own word on being online is often wrong in a basement: the request itself tells
-      queries: { retry: shouldRetry, retryDelay: (attempt) => 400 * 2 ** attempt, staleTime: STALE.always, refetchOnWindowFocus: true, networkMode: 'always' },
-      mutations: { retry: false, networkMode: 'always' },
-    },
-  });
+export const queryDefaults: DefaultOptions = {
+  // the browser's own word on being online is often wrong in a basement: the request itself tells
+  queries: { retry: shouldRetry, retryDelay: (attempt) => 400 * 2 ** attempt, staleTime: STALE.always, refetchOnWindowFocus: true, networkMode: 'always' },
+  mutations: { retry: false, networkMode: 'always' },
+};

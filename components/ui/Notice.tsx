@@ -11,10 +11,10 @@ export type NoticeTone = 'caution' | 'error' | 'plain';
 /** `**…**` at the start of a notice is its strong part. */
 const parts = (text: string) => /^\*\*(.+?)\*\*\s*(.*)$/s.exec(text)?.slice(1, 3) ?? ['', text];
 
-function Words({ text, tone }: { text: string; tone: NoticeTone }) {
+function Words({ text, tone, slim = false }: { text: string; tone: NoticeTone; slim?: boolean }) {
   const [strong = '', rest = ''] = parts(text);
   return (
-    <Text>
+    <Text kind={slim ? 'caption' : 'text'}>
       {strong !== '' && <Inline strong tone={tone === 'caution' ? 'caution' : tone === 'error' ? 'error' : undefined}><RichInline text={strong} /> </Inline>}
       <RichInline text={rest} />
     </Text>
@@ -38,11 +38,11 @@ export function Notice({ tone = 'caution', text, detail, action }: { tone?: Noti
 }
 
 /** A strip over the full width at the top of the page. */
-export function NoticeStrip({ tone = 'caution', text, action }: { tone?: NoticeTone; text: string; action?: ReactNode }) {
+export function NoticeStrip({ tone = 'caution', text, action, slim = false }: { tone?: NoticeTone; text: string; action?: ReactNode; slim?: boolean }) {
   return (
-    <View role="status" style={[styles.strip, strips[tone]]}>
-      <View style={styles.icon}>{ICONS[tone]}</View>
-      <View style={styles.words}><Words text={text} tone={tone} /></View>
+    <View role="status" style={[styles.strip, strips[tone], slim && styles.slim]}>
+      {!slim && <View style={styles.icon}>{ICONS[tone]}</View>}
+      <View style={styles.words}><Words text={text} tone={tone} slim={slim} /></View>
       {action}
     </View>
   );
@@ -57,6 +57,7 @@ const strips = StyleSheet.create({
 const styles = StyleSheet.create({
   box: { flexDirection: 'row', gap: 10, padding: space.md, borderRadius: radius.control },
   strip: { flexDirection: 'row', alignItems: 'center', flexWrap: 'wrap', gap: 10, paddingVertical: space.sm, paddingHorizontal: space.lg, borderBottomWidth: border.hair },
+  slim: { paddingVertical: space.xs },
   icon: { paddingTop: 3 },
   words: { flex: 1, minWidth: 200, gap: space.xs },
   action: { flexDirection: 'row', flexWrap: 'wrap', gap: space.sm, paddingTop: space.xs },

@@ -1,4 +1,4 @@
-import { useEffect, type ReactNode } from 'react';
+import { use, useEffect, type ReactNode } from 'react';
 import { ScrollView, StyleSheet, View } from 'react-native';
 
 import { plainText } from '@/shared/format/richText';
@@ -11,6 +11,7 @@ import { Icon, Sign } from './Glyph';
 import { Heading } from './Heading';
 import { RichInline } from './RichText';
 import { RouteLink, type Path } from './RouteLink';
+import { ScreenCorner } from './screenCorner';
 import { Text } from './Text';
 
 export interface ScreenProps {
@@ -31,6 +32,7 @@ export interface ScreenProps {
 /** The frame of every screen: title, actions, page padding, document title. */
 export function Screen({ title, documentTitle, crumb, back, aside, actions, children }: ScreenProps) {
   const { isWide, isShort } = useLayout();
+  const corner = use(ScreenCorner);
   const page = plainText(documentTitle ?? title);
   useEffect(() => { document.title = `${page} · ${uiText.product}`; }, [page]);
   const bar = actions !== undefined && !isWide && <View style={styles.bar}><ActionsPlace value="bar">{actions}</ActionsPlace></View>;
@@ -46,6 +48,7 @@ export function Screen({ title, documentTitle, crumb, back, aside, actions, chil
             <Heading text={title} level={1} kind={!isWide && back !== undefined ? 'h2' : 'h1'} />
           </View>
           {typeof aside === 'string' ? <Text kind="smallStrong" tone="muted"><RichInline text={aside} /></Text> : aside}
+          {!isWide && back === undefined && corner}
           {isWide && actions !== undefined && <View style={styles.actions}><ActionsPlace value="head">{actions}</ActionsPlace></View>}
         </View>
         {children}
