@@ -1,6 +1,6 @@
 // Metro bundles the web client. Three things differ from Expo's defaults: folders that never belong to the
-// client are out of its sight, zod's fifty languages are replaced by the one the product speaks, and in
-// development /api goes to the server, so that cookies stay same-origin.
+// client are out of its sight, the parts of zod that a browser never needs are replaced by small
+// stand-ins, and in development /api goes to the server, so that cookies stay same-origin.
 const http = require('node:http');
 const path = require('node:path');
 const { getDefaultConfig } = require('expo/metro-config');
@@ -13,15 +13,18 @@ const outside = ['server', 'tests', 'scripts', 'build', 'dist', '.data', 'docs',
   .map((folder) => new RegExp(`^${escaped(path.join(root, folder) + path.sep)}`));
 config.resolver.blockList = [].concat(config.resolver.blockList ?? [], outside);
 
-const zodLocales = path.join(root, 'node_modules', 'zod', 'v4', 'locales') + path.sep;
+const zodFolder = path.join(root, 'node_modules', 'zod', 'v4') + path.sep;
+const standIn = (file) => path.join(root, 'assets', 'bundle', file);
+const replaced = new Map([
+  ['locales/index.js', standIn('zodLocales.js')],
+  ...['core/compile.js', 'core/to-json-schema.js', 'core/json-schema-processors.js', 'core/json-schema-generator.js', 'classic/from-json-schema.js']
+    .map((file) => [file, standIn('zodUnused.js')]),
+].map(([file, by]) => [zodFolder + file.split('/').join(path.sep), by]));
 const resolveBefore = config.resolver.resolveRequest;
 config.resolver.resolveRequest = (context, name, platform) => {
-  const resolve = resolveBefore ?? context.resolveRequest;
-  const found = resolve(context, name, platform);
-  if (found.type === 'sourceFile' && found.filePath === `${zodLocales}index.js`) {
-    return { type: 'sourceFile', filePath: path.join(root, 'assets', 'bundle', 'zodLocales.js') };
-  }
-  return found;
+  const found = (resolveBefore ?? context.resolveRequest)(context, name, platform);
+  const by = found.type === 'sourceFile' && replaced.get(found.filePath);
+  return by ? { type: 'sourceFile', filePath: by } : found;
 };
 
 /** Forwards /api to the server of `npm run dev`. */

@@ -1,6 +1,6 @@
 import { spawnSync } from 'node:child_process';
 import { createHash } from 'node:crypto';
-import { chownSync, existsSync, mkdirSync, readFileSync } from 'node:fs';
+import { chownSync, existsSync, mkdirSync, readFileSync, rmdirSync } from 'node:fs';
 import path from 'node:path';
 import { SetupError, say } from './log.mjs';
 import { root, wantedDataDir } from './paths.mjs';
@@ -24,7 +24,13 @@ function usableBy(account, folder) {
   if (!account) return true;
   chownSync(folder, account.uid, account.gid);
   const asked = spawnSync('/bin/sh', ['-c', 'test -w "$1" && test -x "$1"', 'sh', folder], { cwd: '/', uid: account.uid, gid: account.gid });
-  return asked.status === 0;
+  if (asked.status === 0) return true;
+  try {
+    rmdirSync(folder); // only ever an empty one: nothing is left where nothing will be kept
+  } catch {
+    // it holds something, so it stays
+  }
+  return false;
 }
 
 /** Whether a database was already made in this data directory. */

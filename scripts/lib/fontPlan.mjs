@@ -22,9 +22,9 @@ const range = (from, to) => Array.from({ length: to - from + 1 }, (_, i) => Stri
 const TEXT = [
   range(0x20, 0x7e), range(0xa0, 0x17f), // Latin, Latin-1, Latin Extended-A
   range(0x370, 0x3ff), // Greek
-  range(0x2010, 0x2015), '‘’‚“”„•…′″‹›€™', '\u2002\u2003\u2007\u2009\u200a\u202f\u2011',
+  range(0x2010, 0x2015), '‘’‚“”„•…′″‹›€™', '\u2007\u2009\u200a\u202f\u2011',
   range(0x2070, 0x209c), // raised and lowered figures
-  '−±×÷·≤≥≈≠∞∼√∂∆∑∫←→↑↓↔⇌', '½¼¾⅓⅔⅛', '℃Å',
+  '−±×÷·∙≤≥≈≠≡∞∼√∂∆∑∏∫←→↑↓↔⇌⇒⇔⟨⟩‰ℓᵃᵇ', '½¼¾⅓⅔⅛', '℃Å',
   '■□●○◆◇▲△▸▾▴◂▪▫★☆✓✗',
 ].join('');
 
