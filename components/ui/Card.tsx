@@ -75,7 +75,7 @@ function Words({ label, value, detail, mark, aside }: RowWords) {
       <View style={styles.words}>
         <Text>
           {label !== undefined && <Text tone="muted"><RichInline text={label} /></Text>}
-          {label !== undefined && value !== undefined && '\u2002'}
+          {label !== undefined && value !== undefined && '\u2007'}
           {value !== undefined && <Text kind="strong"><RichInline text={value} /></Text>}
         </Text>
         {detail !== undefined && <Text kind="caption" tone="muted"><RichInline text={detail} /></Text>}
