@@ -30,7 +30,7 @@ const TEXT = [
 
 // These are drawn at one weight only in Brygada 1918, too light for its headings; left out, the browser takes them from
 // Source Sans 3 at the right weight. Digits and letters do gain weight.
-const ONE_WEIGHT_IN_BRYGADA = new Set('#()+/=[\\]{|}~¦¬±×÷‒—―‖₍₎←→↑↓↔−∞≈≠');
+const ONE_WEIGHT_IN_BRYGADA = new Set('#()+/=[\\]{|}~¦¬±×÷‒—―‖₍₎←→↑↓↔−∞≈≠⟨⟩');
 
 /** The characters a family is asked for; those the font does not draw fall away when its subset is made. */
 export function wantedText(family) {
