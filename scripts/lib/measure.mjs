@@ -27,7 +27,7 @@ export async function measure(command, args, { programs = [], client = false, us
   };
   onStopSignal(stopAll);
   try {
-    await setUp({ programs: ['mariadb', ...programs], client });
+    await setUp({ programs: ['mariadb', ...programs], client, measure: true });
     const folder = mkdtempSync(path.join(tmpdir(), `throughbond-${command}-`));
     chmodSync(folder, 0o711); // the database's user must pass through
     toStop.push(async () => rmSync(folder, { recursive: true, force: true }));

@@ -1,6 +1,6 @@
 import { existsSync, mkdirSync } from 'node:fs';
 import { clientDue, ensureClient } from './buildClient.mjs';
-import { ensureServer } from './buildServer.mjs';
+import { ensureMeasure, ensureServer } from './buildServer.mjs';
 import { ensurePackages, missingPackages } from './debian.mjs';
 import { NEEDS, checkDisk } from './disk.mjs';
 import { SetupError, say } from './log.mjs';
@@ -30,9 +30,9 @@ async function together(...works) {
 /**
  * Does all the set-up that is due in this checkout: Debian packages, node modules, client and server builds. Two
  * commands at once take turns.
- * @param {{ programs: ('mariadb' | 'chromium' | 'poppler')[], client?: boolean, server?: boolean }} wanted
+ * @param {{ programs: ('mariadb' | 'chromium' | 'poppler')[], client?: boolean, measure?: boolean }} wanted
  */
-export async function setUp({ programs, client = false, server = true }) {
+export async function setUp({ programs, client = false, measure = false }) {
   checkNode();
   mkdirSync(inRoot('build'), { recursive: true });
   const lock = await waitForLock(inRoot('build', 'setup.lock'), {
@@ -44,7 +44,8 @@ export async function setUp({ programs, client = false, server = true }) {
     await checkDisk(root, bytesDue({ programs, client }));
     if (!existsSync(wantedDataDir())) await checkDisk(wantedDataDir(), NEEDS.database);
     await together(() => ensurePackages(programs), () => ensureNodeModules());
-    if (server) await ensureServer();
+    await ensureServer();
+    if (measure) await ensureMeasure();
     if (client) await ensureClient();
   } finally {
     lock.release();
