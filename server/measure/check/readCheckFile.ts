@@ -2,6 +2,7 @@ import { readFile } from 'node:fs/promises';
 
 import { z } from 'zod';
 
+import { asRecord } from '../lib/read';
 import { Refusal } from '../lib/refusal';
 import { type Check, EXPECT_KINDS } from './types';
 
@@ -18,7 +19,6 @@ const check = z.object({
   how: z.string(),
   in_reference: z.boolean().optional(),
 });
-const checkFile = z.union([z.array(check), z.object({ checks: z.array(check) }).transform((file) => file.checks)]);
 
 /** Reads a check file; what is kept of a check is what the schema names, so no adapter ever sees `for_reader`. */
 export async function readCheckFile(path: string): Promise<Check[]> {
@@ -26,13 +26,16 @@ export async function readCheckFile(path: string): Promise<Check[]> {
 }
 
 export function parseChecks(content: unknown, path: string): Check[] {
-  const read = checkFile.safeParse(content);
+  const read = z.array(check).safeParse(rowsOf(content, 'checks'));
   if (!read.success) {
     const first = read.error.issues[0];
     throw new Refusal(`${path} is not a check file: ${first?.path.join('.') ?? ''} ${first?.message ?? ''}`.trim());
   }
   return read.data;
 }
+
+/** The rows of a file, which lie bare or under a name of their own. */
+export const rowsOf = (content: unknown, name: string): unknown => (Array.isArray(content) ? content : asRecord(content)?.[name]);
 
 export async function readJson(path: string): Promise<unknown> {
   let text: string;

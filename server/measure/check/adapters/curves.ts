@@ -1,6 +1,7 @@
 import { evaluateResponse, invertResponse } from '@/shared/contracts/relations';
 
 import type { Api } from '../../lib/api';
+import { drawFrom } from '../../lib/draw';
 import { asList, asNumber, asRecord } from '../../lib/read';
 import type { Came } from '../types';
 import { type Adapter, notCovered, unknownKey } from './adapter';
@@ -75,15 +76,4 @@ function substituentsFrom(given: unknown): unknown {
     const substituent = asRecord(one);
     return { dchiAlpha: substituent?.dchi_alpha, dchiBeta: substituent?.dchi_beta ?? [], xi: substituent?.xi };
   });
-}
-
-/** A small seeded generator (mulberry32), so that a sampled property gives the same samples each run. */
-export function drawFrom(seed: number): () => number {
-  let state = seed >>> 0;
-  return () => {
-    state = (state + 0x6d2b79f5) >>> 0;
-    let mixed = Math.imul(state ^ (state >>> 15), 1 | state);
-    mixed = (mixed + Math.imul(mixed ^ (mixed >>> 7), 61 | mixed)) ^ mixed;
-    return ((mixed ^ (mixed >>> 14)) >>> 0) / 4294967296;
-  };
 }
