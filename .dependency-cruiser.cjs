@@ -3,10 +3,17 @@ module.exports = {
   forbidden: [
     {
       name: 'engine-is-pure',
-      comment: 'The engine replays signed cases years later: no I/O, clock, randomness or UI, so it imports only its own files, shared/types and mathjs.',
+      comment: 'The engine replays signed cases years later: no I/O, clock, randomness or UI, so it imports only its own files, types, mathjs, and the words and number formats of its sentences.',
       severity: 'error',
       from: { path: '^shared/engine/' },
-      to: { pathNot: ['^shared/(engine|types)/', '^node_modules/mathjs/'] },
+      to: { pathNot: ['^shared/(engine|types|format)/', '^shared/text/engine/', '^node_modules/mathjs/'] },
+    },
+    {
+      name: 'words-and-formats-are-pure',
+      comment: 'They speak for the engine too, so what holds for it holds for them.',
+      severity: 'error',
+      from: { path: '^shared/(text|format)/' },
+      to: { pathNot: '^shared/(text|format|types|engine|limits\\.ts)' },
     },
     {
       name: 'types-stand-alone',

@@ -6,7 +6,7 @@ const engineOnly = ['error', {
   patterns: [
     { regex: '^node:', message: 'The engine is pure: no files, network or processes.' },
     { regex: '^(react|react-native|expo|express|sequelize|zod|@tanstack)', message: 'The engine imports only its own files, shared/types and mathjs.' },
-    { regex: '^@/(app|components|server|shared/(contracts|text|format|limits))', message: 'The engine imports only its own files and shared/types.' },
+    { regex: '^@/(app|components|server|shared/(contracts|limits))', message: 'The engine imports only its own files, shared/types, and its words and number formats.' },
   ],
 }];
 
@@ -22,7 +22,7 @@ export default tseslint.config(
       'no-warning-comments': ['error', { terms: ['todo', 'fixme', 'xxx'] }],
       'max-lines': ['error', { max: 340, skipBlankLines: true, skipComments: true }],
       '@typescript-eslint/ban-ts-comment': ['error', { 'ts-ignore': true, 'ts-expect-error': true, 'ts-nocheck': true }],
-      '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
+      '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports', disallowTypeAnnotations: false }],
       '@typescript-eslint/no-explicit-any': 'error',
       '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_', ignoreRestSiblings: true }],
       '@typescript-eslint/restrict-template-expressions': ['error', { allowNumber: true, allowBoolean: true }],

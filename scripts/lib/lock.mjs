@@ -1,7 +1,11 @@
 import { linkSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
 import { pause } from './run.mjs';
 
-/** When a process began, in clock ticks since boot: with its number it names a process for good. Null = not alive. */
+/**
+ * When a process began, in clock ticks since boot: with its number it names a process for good. Null = not alive.
+ * @param {number} pid
+ * @returns {string | null}
+ */
 export function startOf(pid) {
   try {
     const stat = readFileSync(`/proc/${pid}/stat`, 'utf8');
@@ -12,7 +16,11 @@ export function startOf(pid) {
   }
 }
 
-/** What the lock file says and whether its holder lives: `{ pid, … }` or null. */
+/**
+ * What the lock file says if its holder lives.
+ * @param {string} file
+ * @returns {{ pid: number, began: string, port?: number, address?: string } | null}
+ */
 export function holderOf(file) {
   try {
     const holder = JSON.parse(readFileSync(file, 'utf8'));
@@ -68,7 +76,12 @@ function setAside(file) {
   rmSync(aside, { force: true });
 }
 
-/** Takes the lock, waiting while another command holds it; `onWait` is called once with the holder. */
+/**
+ * Takes the lock, waiting while another command holds it; `onWait` is called once with the holder.
+ * @param {string} file
+ * @param {{ onWait: (holder: { pid: number }) => void, timeoutMs: number }} options
+ * @returns {Promise<{ held: true, release: () => void } | null>} null when the time is over
+ */
 export async function waitForLock(file, { onWait, timeoutMs }) {
   const until = Date.now() + timeoutMs;
   let told = false;

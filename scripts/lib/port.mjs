@@ -1,6 +1,9 @@
 import net from 'node:net';
 
-/** A port of the loopback address that nobody listens on at this moment. */
+/**
+ * A port of the loopback address that nobody listens on at this moment.
+ * @returns {Promise<number>}
+ */
 export function freePort() {
   return new Promise((resolve, reject) => {
     const server = net.createServer();
@@ -12,7 +15,11 @@ export function freePort() {
   });
 }
 
-/** Whether a server could listen on this port of every address now. */
+/**
+ * Whether a server could listen on this port of every address now.
+ * @param {number} port
+ * @returns {Promise<boolean>}
+ */
 export function isFree(port) {
   return new Promise((resolve) => {
     const server = net.createServer();
@@ -21,7 +28,11 @@ export function isFree(port) {
   });
 }
 
-/** Whether a MariaDB greets on this loopback port (its first packet carries protocol version 10). */
+/**
+ * Whether a MariaDB greets on this loopback port (its first packet carries protocol version 10).
+ * @param {number} port
+ * @returns {Promise<boolean>}
+ */
 export function greets(port, timeoutMs = 1000) {
   return new Promise((resolve) => {
     const socket = net.connect({ host: '127.0.0.1', port });

@@ -17,7 +17,7 @@ interface Product {
 
 /** The built product that the set-up of the end-to-end tests started, with the demo loaded. */
 export function product(): Product {
-  const file = process.env.TEST_PRODUCT;
+  const file = process.env.TEST_PRODUCT as string | undefined; // Metro types every variable as any
   if (!file) throw new Error('No product: run this file in the project "e2e" of jest.');
   return JSON.parse(readFileSync(file, 'utf8')) as Product;
 }

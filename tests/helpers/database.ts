@@ -26,7 +26,7 @@ interface TestDatabase {
 }
 
 function testDatabase(): TestDatabase {
-  const file = process.env.TEST_DB;
+  const file = process.env.TEST_DB as string | undefined; // Metro types every variable as any
   if (!file) throw new Error('No test database: run this file in the project "api" or "e2e" of jest.');
   return JSON.parse(readFileSync(file, 'utf8')) as TestDatabase;
 }
