@@ -1,10 +1,18 @@
 import type { Deps } from '@/server/deps';
 import type { Route } from '@/server/http/route';
+import { accountRoutes } from './account/routes';
+import { adminRoutes } from './admin/routes';
 import { healthRoutes } from './health/routes';
+import { mailboxRoutes } from './mailbox/routes';
 import { sessionRoutes } from './session/routes';
+import { teamRoutes } from './team/routes';
 
 /** Every route of the product, in one list: what is mounted is what the description of the API is made from. */
 export const allRoutes = (deps: Deps): Route[] => [
   ...healthRoutes(deps),
   ...sessionRoutes(deps),
+  ...accountRoutes(deps),
+  ...teamRoutes(deps),
+  ...adminRoutes(deps),
+  ...mailboxRoutes(deps),
 ];

@@ -3,6 +3,7 @@ import { z } from 'zod';
 
 import type { Actor } from '@/server/auth/actor';
 import type { Sessions } from '@/server/auth/sessions';
+import { mayAdminister } from '@/server/features/admin/policy';
 import { id } from '@/shared/contracts/common';
 import { LIMITS } from '@/shared/limits';
 import { problemText } from '@/shared/text/problems';
@@ -29,10 +30,10 @@ export interface FileAnswer {
   file: string;
 }
 
-interface RouteSpec<A extends Access, P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType, R extends z.ZodType | FileAnswer> {
+interface RouteSpec<S extends string, A extends Access, P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType, R extends z.ZodType | FileAnswer> {
   method: Method;
   /** with placeholders: /api/cases/:caseId. One whose name ends in Id is a UUID unless `params` says otherwise. */
-  path: string;
+  path: S;
   summary: string;
   access: A;
   params?: P;
@@ -55,7 +56,8 @@ export interface Call<A extends Access, P, Q, B> {
   res: Response;
 }
 
-type Params<P extends z.ZodType> = unknown extends z.output<P> ? Record<string, string> : z.output<P>;
+type Placeholder<S extends string> = S extends `${string}:${infer Name}/${infer Rest}` ? Name | Placeholder<`/${Rest}`> : S extends `${string}:${infer Name}` ? Name : never;
+type Params<S extends string, P extends z.ZodType> = unknown extends z.output<P> ? Record<Placeholder<S>, string> : z.output<P>;
 type BodyOf<B extends z.ZodType> = unknown extends z.output<B> ? Buffer : z.output<B>;
 type AnswerOf<R> = R extends z.ZodType ? z.input<R> : void;
 
@@ -87,9 +89,9 @@ function paramsSchema(path: string, given: z.ZodType | undefined): z.ZodType | n
 }
 
 /** Describes one route; nothing happens until it is mounted. */
-export function route<A extends Access, R extends z.ZodType | FileAnswer, P extends z.ZodType = z.ZodUnknown, Q extends z.ZodType = z.ZodUnknown, B extends z.ZodType = z.ZodUnknown>(
-  spec: RouteSpec<A, P, Q, B, R>,
-  handle: (call: Call<A, Params<P>, z.output<Q>, BodyOf<B>>) => AnswerOf<R> | Promise<AnswerOf<R>>,
+export function route<S extends string, A extends Access, R extends z.ZodType | FileAnswer, P extends z.ZodType = z.ZodUnknown, Q extends z.ZodType = z.ZodUnknown, B extends z.ZodType = z.ZodUnknown>(
+  spec: RouteSpec<S, A, P, Q, B, R>,
+  handle: (call: Call<A, Params<S, P>, z.output<Q>, BodyOf<B>>) => AnswerOf<R> | Promise<AnswerOf<R>>,
 ): Route {
   return {
     method: spec.method, path: spec.path, summary: spec.summary, access: spec.access, params: paramsSchema(spec.path, spec.params), query: spec.query ?? null,
@@ -127,7 +129,7 @@ function enter({ access }: Route, sessions: Sessions): RequestHandler {
     response.locals.who = who;
     response.setHeader('Cache-Control', 'no-store');
     if (!who && access !== 'optional') throw new Problem('not-signed-in', problemText.signInFirst);
-    if (access === 'administrator' && who?.siteRole !== 'administrator') throw new Problem('not-allowed', problemText.administratorsOnly);
+    if (access === 'administrator' && !(who && mayAdminister(who))) throw new Problem('not-allowed', problemText.administratorsOnly);
     next();
   };
 }

@@ -12,5 +12,3 @@ export const keepLetter = ({ db, now, newId }: { db: Sequelize; now: () => Date;
   const kept = await MailModel.create({ messageId: newId(), recipient: letter.to, subject: letter.subject, text: letter.text, link, at: now() });
   if (kept.id > MOST_KEPT) await db.query('DELETE FROM mailbox WHERE id <= :oldest', { replacements: { oldest: kept.id - MOST_KEPT } });
 };
-
-export const readMailbox = () => MailModel.findAll({ order: [['id', 'DESC']], limit: MOST_KEPT });

@@ -12,8 +12,11 @@ export interface Letter {
 export interface Mailer {
   /** Sends now and fails loudly. */
   send: (letter: Letter) => Promise<void>;
-  /** Sends in the background: the person who caused it need not wait, and learns nothing from the time it takes. */
-  post: (letter: Letter) => void;
+  /**
+   * Sends in the background: the person who caused it need not wait, and learns nothing from the time it takes.
+   * A function makes the letter there too; null sends nothing.
+   */
+  post: (letter: Letter | (() => Promise<Letter | null>)) => void;
   /** Waits for what is under way. */
   settled: () => Promise<void>;
 }
@@ -52,7 +55,11 @@ export function createMailer(send: Send, log: Log): Mailer {
   return {
     send,
     post: (letter) => {
-      const sending = send(letter).catch((error: unknown) => log.error('mail-failed', error)).finally(() => underWay.delete(sending));
+      const deliver = async () => {
+        const ready = typeof letter === 'function' ? await letter() : letter;
+        if (ready) await send(ready);
+      };
+      const sending: Promise<void> = deliver().catch((error: unknown) => log.error('mail-failed', error)).finally(() => underWay.delete(sending));
       underWay.add(sending);
     },
     settled: async () => {

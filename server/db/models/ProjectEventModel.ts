@@ -1,6 +1,6 @@
 import { DataTypes, Model, type CreationOptional, type InferAttributes, type InferCreationAttributes, type Sequelize } from 'sequelize';
 
-import type { ProjectEvent } from '@/server/features/team/events';
+import type { ProjectEvent } from '@/shared/types/projectEvent';
 
 export class ProjectEventModel extends Model<InferAttributes<ProjectEventModel>, InferCreationAttributes<ProjectEventModel>> {
   declare id: CreationOptional<number>;
