@@ -1,4 +1,4 @@
-import { LIMITS } from '../limits';
+import { GRADE_WORDS } from '../format/words';
 import type { Calculation, CandidateClaim, CaseContent, EvidenceKind, Reading, SignState } from '../types/case';
 import type { Grade } from '../types/answer';
 
@@ -23,7 +23,6 @@ export const bearingWords = { for: 'for', against: 'against', neutral: 'says nei
 export const signWords: Record<SignState, string> = { 'not-measured': 'not measured', positive: 'positive', negative: 'negative' };
 export const pathWords = { '1J': '¹_J_, one bond', '2J': '²_J_, geminal', '3J': '³_J_, vicinal', '4J': '⁴_J_, four bonds', '5J': '⁵_J_, five bonds' } as const;
 export const pathShort = { '1J': '¹_J_', '2J': '²_J_', '3J': '³_J_', '4J': '⁴_J_', '5J': '⁵_J_' } as const;
-export const gradeWords: Record<Grade, string> = { assigned: 'assigned', tentative: 'tentative', 'not-decided': 'not decided' };
 export const turningWords = { free: 'turns freely', ring: 'in a ring', unknown: 'not told' } as const;
 export const NONE_OF_THESE = 'none of these';
 
@@ -99,11 +98,11 @@ export function partValue(path: string, value: unknown, content: CaseContent): s
   if (head === 'calculations') return calculationWords(value as Calculation);
   if (head === 'candidates' && third === undefined) return (value as { name: string }).name || 'without a name';
   if (head === 'evidence' && third === undefined) return (value as { text: string }).text || null;
-  if (head === 'answer' && second === undefined) { const answer = value as NonNullable<CaseContent['answer']>; return `${gradeWords[answer.grade]}: ${candidateName(content, answer.candidateId)}`; }
+  if (head === 'answer' && second === undefined) { const answer = value as NonNullable<CaseContent['answer']>; return `${GRADE_WORDS[answer.grade]}: ${candidateName(content, answer.candidateId)}`; }
   if (field === 'claims') return (value as CandidateClaim[]).map(claimWords).join('; ') || null;
   if (field === 'attachmentIds') { const count = (value as string[]).length; return count === 0 ? null : count === 1 ? '1 file' : `${count} files`; }
   if (field === 'candidateId') return candidateName(content, value as string);
-  if (field === 'grade') return gradeWords[value as Grade];
+  if (field === 'grade') return GRADE_WORDS[value as Grade];
   if (field === 'sign') return signWords[value as SignState];
   if (field === 'path' && head === 'readings') return pathWords[value as keyof typeof pathWords];
   if (head === 'evidence' && field === 'kind') return evidenceKindWords[value as EvidenceKind];

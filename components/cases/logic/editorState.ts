@@ -114,7 +114,8 @@ export function editorReducer(state: EditorState, event: EditorEvent): EditorSta
 function meet(state: EditorState, saved: Saved): EditorState {
   if (saved.version < state.base.version) return state;                       // an older answer that came late
   if (!isDirty(state)) return settle({ ...state, base: saved, content: saved.content, theirs: null }, 'waiting');
-  if (same(saved.content, state.base.content)) return settle({ ...state, base: saved, theirs: null }, state.status === 'conflict' ? 'waiting' : state.status);
+  // only the count moved on (a claim, a comment); the server has answered, so there is nothing left to wait for
+  if (same(saved.content, state.base.content)) return settle({ ...state, base: saved, theirs: null }, state.status === 'refused' ? 'refused' : 'waiting');
   if (same(saved.content, state.content)) return settle({ ...state, base: saved, content: saved.content, theirs: null }, 'waiting');
   return { ...state, status: 'conflict', sending: null, theirs: saved };
 }
