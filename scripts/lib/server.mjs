@@ -75,9 +75,9 @@ export async function startServer({ env, port, args = [builtServer()], quiet = f
   const stop = async () => {
     if (over) return;
     child.kill('SIGTERM');
-    const late = await Promise.race([ended.then(() => false), pause(1500).then(() => true)]);
-    if (late) child.kill('SIGKILL');
+    const patience = setTimeout(() => child.kill('SIGKILL'), 1500);
     await ended;
+    clearTimeout(patience);
   };
   onSpawn?.(stop);
   for (const until = Date.now() + 60_000; ;) {
