@@ -1,6 +1,6 @@
 import type { Degrees, Hz } from './units';
 
-/** How a typed value was read. `typed` is kept as typed, digits and all. */
+/** How a typed value was read. `typed` is kept as typed, digits and all; '' where an answer needs no J (no vicinal path). */
 export interface HzReading {
   typed: string;
   /** central value; for a limit the bound itself */
@@ -48,7 +48,8 @@ export interface Root {
   sector: Sector;
 }
 
-/** Allowed stretch of φ, from in (−180, 180]; `toDeg` may run past 180 to close the circle (never more than from + 360). */
+/** Allowed stretch of φ, from in (−180, 180]; `toDeg` may run past 180 to close the circle (never more than from + 360).
+ * The whole circle is −180 to 180. */
 export interface Arc {
   fromDeg: Degrees;
   toDeg: Degrees;

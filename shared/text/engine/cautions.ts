@@ -1,0 +1,36 @@
+import type { CautionId } from '../../types/answer';
+import { NBSP } from '../../format/number';
+
+/** What each caution says. A caution can be answered, never switched off. */
+export const cautionText: Readonly<Record<CautionId, string>> = {
+  'relative-only': '_J_ gives relative geometry, not absolute configuration: R or S needs another source.',
+  'may-be-averaged': `5 to 8.5${NBSP}Hz on a bond that turns may be an average of forms: one angle is not supported.`,
+  'several-roots': 'Several angles fit equally: the sign of _φ_ or a second coupling is needed to part them.',
+  'out-of-domain': 'The path lies outside the relation’s domain: its error there is not known.',
+  'alkene-border': 'The value lies near the border: measured sets overlap there, and electronegative groups lower both.',
+  'no-vicinal-path': 'No H,H pair across the bond: use ³_J_(C,H), NOE and both isomers; the usual trans > cis can invert in enals.',
+  'sign-not-measured': 'The sign was not measured: both signs are carried.',
+  'negative-vicinal': 'A negative vicinal ³_J_(H,H) is known only in cis-1,2-difluoroethene: check that the sign was measured.',
+  'limit-used': 'A limit is used as an interval, not as a value: the answer holds for all of it.',
+  'partner-differs': 'The two partners differ by more than 2_σ_: one splitting is misread or they do not couple; no answer from the pair.',
+  'larger-than-usual': 'Larger than usual for this bond: check path, field and unit first.',
+  'smaller-than-usual': 'Smaller than any vicinal coupling held for an open C=C: it may be an allylic or geminal splitting.',
+  'from-memory': 'A number used here is from memory, its source was not seen: tentative at most where the answer leans on it.',
+  'common-practice': 'A number used here is common practice without a source: tentative at most where the answer leans on it.',
+  'cis-trans-not-ez': 'Cis and trans are geometry, E and Z follow priority: with these groups they do not go together as usual.',
+  'groups-not-given': 'Groups were not given: what they do to _J_ is not allowed for.',
+  'ring-fact': 'In a ring of up to seven members CH=CH is cis by the ring; _J_ adds only whether the ring size fits.',
+  'symmetric-alkene': 'The two =CH are equivalent: their coupling shows only in ¹³C satellites or with a label.',
+  'diene-single-bond': `About 10${NBSP}Hz beside a vinyl group may be the single bond between the two double bonds.`,
+  'polar-carbon': 'A carbon on the path bears O, N, F or halogen: a plain curve misses by 3 to 5 Hz there.',
+  'sp2-neighbour': 'A group beside the path is unsaturated: the relation was not fitted there, and its spread is raised.',
+  'beyond-reach': 'No angle gives this value exactly; what is allowed comes from the error alone.',
+  'one-candidate': 'Fewer than two candidates: alternatives are not complete.',
+  'untested-candidate': 'A candidate was not tested by any calculation.',
+  'candidates-conflict': 'Every candidate is excluded: a reading, a relation or the list of candidates is wrong.',
+  'relation-superseded': 'A relation used here has a newer version: the result stands under the version named.',
+  'small-sample': 'Few compounds are held in this class: take its likelihoods as a ranking.',
+  'exchange-partner': 'OH or NH on the coupling: exchange may average or hide it, and no splitting is not no coupling.',
+  'second-order': 'The spectrum may be second order: a spacing need not be a coupling.',
+  'coarse-reading': 'Typed without decimals: rounding is part of the error.',
+};
