@@ -1,4 +1,10 @@
 // npm run demo -- load|reset|remove: the invented demo projects, cases and accounts.
-import { dataCommand } from './lib/dataCommand.mjs';
+import { withData } from './lib/dataCommand.mjs';
+import { say } from './lib/log.mjs';
 
-await dataCommand(['demo', ...process.argv.slice(2)], 'npm run demo -- load | reset | remove   load: when absent; reset: as on the first day; remove: accounts and cases');
+const [act] = process.argv.slice(2);
+if (!['load', 'reset', 'remove'].includes(act)) {
+  say('npm run demo -- load | reset | remove\nload: when it is not there; reset: as on the first day; remove: its accounts and cases');
+  process.exit(act === '--help' ? 0 : 2);
+}
+await withData((command) => command(['demo', act]));

@@ -13,7 +13,7 @@ interface Setting {
   passwords: Passwords;
 }
 
-const USAGE = 'Commands: serve (default) | migrate | demo load|reset|remove | admin create --email A --name N --password P';
+const USAGE = 'Commands: serve (default) | migrate | demo load|reset|remove | admin create --email A --name N --password P (or ADMIN_PASSWORD)';
 const say = (sentence: string) => console.error(sentence);
 
 /** Waits for the end: Ctrl-C, a service manager's SIGTERM. A second signal ends at once. */
@@ -35,7 +35,7 @@ async function runMigrate({ env, passwords }: Setting): Promise<void> {
 
 async function runAdmin({ env, passwords }: Setting, args: string[]): Promise<void> {
   const { values } = parseArgs({ args, options: { email: { type: 'string' }, name: { type: 'string' }, password: { type: 'string' } } });
-  const made = await createAdministrator(neededDatabaseUrl(env), passwords, { email: values.email ?? '', name: values.name ?? '', password: values.password ?? '' });
+  const made = await createAdministrator(neededDatabaseUrl(env), passwords, { email: values.email ?? '', name: values.name ?? '', password: values.password ?? (process.env.ADMIN_PASSWORD as string | undefined) ?? '' });
   say(made);
   await passwords.close();
 }

@@ -4,15 +4,11 @@ import { migrate, serverCommand, serverEnv } from './server.mjs';
 import { setUp } from './setup.mjs';
 
 /**
- * Runs a command of the server on the product's data: in the database of a running `npm start` if there is one,
- * otherwise in one started for the command's time.
- * @param {string[]} args the server's command, for instance ['admin', 'create']
+ * Runs commands of the server on the product's data: in the database of a running `npm start` if there is one,
+ * otherwise in one started for the time of the work.
+ * @param {(command: (args: string[], extra?: NodeJS.ProcessEnv) => Promise<string>) => Promise<unknown>} work
  */
-export async function dataCommand(args, usage) {
-  if (args.length < 2 || args.includes('--help')) {
-    process.stderr.write(`${usage}\n`);
-    process.exit(args.includes('--help') ? 0 : 2);
-  }
+export async function withData(work) {
   let stop = async () => undefined;
   onStopSignal(() => stop());
   try {
@@ -20,8 +16,9 @@ export async function dataCommand(args, usage) {
     const { dataDir, db, external } = await openData({ mayJoin: true });
     stop = db.stop;
     if (db.ownerUrl && !db.joined) await migrate({ dataDir, db, external });
-    await serverCommand(args, serverEnv({ dataDir, ...db }), { show: true });
+    await work((args, extra) => serverCommand(args, serverEnv({ dataDir, ...db, extra }), { show: true }));
     await stop();
+    process.exit(0);
   } catch (error) {
     await stop();
     endWith(error);

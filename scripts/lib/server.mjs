@@ -25,7 +25,7 @@ export const builtServer = () => inRoot('build', 'server.mjs');
 /** Runs a command of the server (`migrate`, `demo load`, …); a failure ends with what it said. */
 export async function serverCommand(args, env, { show = false } = {}) {
   const { code, output } = await run(process.execPath, [builtServer(), ...args], { env, stdio: show ? 'show' : 'collect' });
-  if (code !== 0) throw new SetupError(show ? `The command "${args.join(' ')}" ended with exit code ${code}.` : tail(output, 12) || `The command "${args.join(' ')}" failed with exit code ${code}.`);
+  if (code !== 0) throw new SetupError(show ? 'Nothing was changed; the line above says why.' : tail(output, 12) || `The command "${args.join(' ')}" failed with exit code ${code}.`);
   return output;
 }
 
