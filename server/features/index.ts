@@ -1,4 +1,5 @@
 import type { Deps } from '@/server/deps';
+import { docsRoutes } from '@/server/http/docs/routes';
 import type { Route } from '@/server/http/route';
 import { accountRoutes } from './account/routes';
 import { adminRoutes } from './admin/routes';
@@ -8,11 +9,15 @@ import { sessionRoutes } from './session/routes';
 import { teamRoutes } from './team/routes';
 
 /** Every route of the product, in one list: what is mounted is what the description of the API is made from. */
-export const allRoutes = (deps: Deps): Route[] => [
-  ...healthRoutes(deps),
-  ...sessionRoutes(deps),
-  ...accountRoutes(deps),
-  ...teamRoutes(deps),
-  ...adminRoutes(deps),
-  ...mailboxRoutes(deps),
-];
+export function allRoutes(deps: Deps): Route[] {
+  const routes: Route[] = [
+    ...healthRoutes(deps),
+    ...sessionRoutes(deps),
+    ...accountRoutes(deps),
+    ...teamRoutes(deps),
+    ...adminRoutes(deps),
+    ...mailboxRoutes(deps),
+    ...docsRoutes(() => routes),
+  ];
+  return routes;
+}
