@@ -18,11 +18,10 @@ import type { Log } from './http/log';
 import { keepLetter } from './mail/mailbox';
 import { createMailer, localSender, smtpSender } from './mail/mailer';
 
-/** Everything the server works with, from its settings; nothing listens yet. */
-export function makeDeps(env: Env, log: Log, passwords: Passwords): Deps {
+/** Everything the server works with, from its settings; nothing listens yet. A test hands in a clock that it can move. */
+export function makeDeps(env: Env, log: Log, passwords: Passwords, now: () => Date = () => new Date()): Deps {
   const db = openDatabase(neededDatabaseUrl(env));
   defineModels(db);
-  const now = () => new Date();
   const newId = randomUUID;
   const keep = keepLetter({ db, now, newId });
   const send = env.smtpUrl ? smtpSender(env.smtpUrl, env.mailFrom) : localSender(env.mailFrom, keep);
