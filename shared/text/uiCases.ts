@@ -57,6 +57,8 @@ export const uiCases = {
     title: 'New case',
     lead: 'One stereochemical question about one compound.',
     project: 'Project',
+    chooseProject: 'Choose a project',
+    projectEmpty: 'Choose the project this case belongs to.',
     question: 'Question',
     questionHint: 'As you would ask a colleague: Enol ether 5: E or Z?',
     questionEmpty: 'Write the question this case decides.',
