@@ -8,10 +8,14 @@ import { Text } from './Text';
 import { web } from './webProps';
 
 /** A folded part: an underlined line that opens to more. Used for the table twin of every plot and for the trail. */
-export function Disclosure({ label, openLabel, detail, startOpen = false, children, edge = 'top' }: {
-  label: string; openLabel?: string; detail?: string; startOpen?: boolean; children: ReactNode; edge?: 'top' | 'none';
+export function Disclosure({ label, openLabel, detail, startOpen = false, heldOpen = false, children, edge = 'top' }: {
+  label: string; openLabel?: string; detail?: string; startOpen?: boolean;
+  /** open whatever was pressed: something inside is filled in or needs attention */
+  heldOpen?: boolean;
+  children: ReactNode; edge?: 'top' | 'none';
 }) {
-  const [open, setOpen] = useState(startOpen);
+  const [wanted, setOpen] = useState(startOpen);
+  const open = wanted || heldOpen;
   return (
     <View>
       <Pressable role="button" onPress={() => setOpen(!open)} style={[styles.line, edge === 'top' && styles.edge]} {...web({ 'aria-expanded': open })}>

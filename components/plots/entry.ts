@@ -1,0 +1,2 @@
+export { AnswerPlots } from './AnswerPlots';
+export { RelationCurve } from './RelationCurve';
