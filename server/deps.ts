@@ -1,5 +1,6 @@
 import type { Sequelize } from 'sequelize';
 
+import type { Registry } from '@/shared/types/relation';
 import type { Actor } from './auth/actor';
 import type { Passwords } from './auth/passwords';
 import type { Sessions } from './auth/sessions';
@@ -19,7 +20,8 @@ export interface Deps {
   throttle: Throttle;
   sessions: Sessions;
   mail: Mailer;
-  engineVersion: string;
+  /** the relations at hand, read and verified once at start */
+  relations: Registry;
   /** cases that wait for this person as a reviewer: the badge on Reviews */
   reviewsWaiting: (db: Sequelize, who: Actor) => Promise<number>;
 }

@@ -16,6 +16,7 @@ import type { Deps } from './deps';
 import { neededDatabaseUrl, SettingError, type Env } from './env';
 import type { Log } from './http/log';
 import { keepLetter } from './mail/mailbox';
+import { relationRegistry } from './relations/registry';
 import { createMailer, localSender, smtpSender } from './mail/mailer';
 
 /** Everything the server works with, from its settings; nothing listens yet. A test hands in a clock that it can move. */
@@ -30,7 +31,7 @@ export function makeDeps(env: Env, log: Log, passwords: Passwords, now: () => Da
     throttle: createThrottle({ db, now }),
     sessions: createSessions({ db, secret: sessionSecret(env.dataDir), now }),
     mail: createMailer(send, log),
-    engineVersion: 'none',
+    relations: relationRegistry(),
     reviewsWaiting: () => Promise.resolve(0),
   };
 }

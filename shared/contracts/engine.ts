@@ -21,7 +21,7 @@ export const hzReading = z.object({
 });
 export const inputNote = z.object({
   field: fieldName,
-  code: z.enum(['decimal-comma', 'unit-typed', 'approximate', 'default-error', 'limit', 'range', 'sign-dropped', 'digits-coarse']),
+  code: z.enum(['decimal-comma', 'unit-typed', 'approximate', 'default-error', 'limit', 'range', 'sign-dropped', 'digits-coarse', 'stereo-ignored']),
   text: z.string(),
 });
 export const mend = z.object({ label: z.string(), field: fieldName, value: z.string() });

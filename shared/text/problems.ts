@@ -51,6 +51,13 @@ export const problemText = {
   endInPast: 'The end date lies in the past; choose today or later.',
   leadsOnly: 'Only a lead of the project can do this.',
   lastAdministrator: 'The site keeps one administrator; make somebody else administrator first.',
+  relationUnknown: 'No relation with this id is held; GET /api/relations lists them.',
+  relationGivesNoAngle: 'This relation is a table of classes and gives no angle; choose one with a curve.',
+  groupsNeeded: 'This relation needs all four groups, H included, or the substituents themselves.',
+  groupsOrSubstituents: 'Give the groups or the substituents, not both.',
+  noElectronegativity: (elements: string) => `No electronegativity is held for ${elements}, so this relation gives no value here; choose another.`,
+  neighboursUntold: (elements: string) => `The other neighbours of ${elements} are needed, as in C(H,H,H) for methyl.`,
+  setUnknown: 'This relation has no such set for these groups; leave the set out to take the usual one.',
   ownAccount: 'You cannot disable your own account; another administrator can.',
 } as const;
 

@@ -17,7 +17,7 @@ export interface HzReading {
 /** What was understood from a value that is fine but was not typed plainly (decimal comma, unit typed in, "ca."). */
 export interface InputNote {
   field: FieldName;
-  code: 'decimal-comma' | 'unit-typed' | 'approximate' | 'default-error' | 'limit' | 'range' | 'sign-dropped' | 'digits-coarse';
+  code: 'decimal-comma' | 'unit-typed' | 'approximate' | 'default-error' | 'limit' | 'range' | 'sign-dropped' | 'digits-coarse' | 'stereo-ignored';
   text: string;
 }
 

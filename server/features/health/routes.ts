@@ -5,6 +5,7 @@ import { missingMigrations } from '@/server/db/migrator';
 import { demoIsLoaded } from '@/server/features/account/demo';
 import type { Deps } from '@/server/deps';
 import { route, type Route } from '@/server/http/route';
+import { ENGINE_VERSION } from '@/shared/engine/version';
 import { healthResponse, type HealthResponse } from '@/shared/contracts/health';
 
 type DatabaseHealth = Pick<HealthResponse, 'database' | 'schema' | 'demo'>;
@@ -34,6 +35,6 @@ export const healthRoutes = (deps: Deps): Route[] => [
     const ok = found.database === 'ok' && found.schema === 'current';
     res.setHeader('Cache-Control', 'no-store');
     if (!ok) res.status(503);
-    return { status: ok ? 'ok' as const : 'degraded' as const, version, engineVersion: deps.engineVersion, ...found, uptimeS: Math.round(process.uptime()) };
+    return { status: ok ? 'ok' as const : 'degraded' as const, version, engineVersion: ENGINE_VERSION, ...found, uptimeS: Math.round(process.uptime()) };
   }),
 ];
