@@ -5,6 +5,7 @@ import { drawSign } from './marks';
 import type { SheetModel } from './model';
 import { PAPER } from './palette';
 import { drawAnswer, drawCalculated, drawClosing, drawFurniture, drawJudged, drawMeasured } from './sections';
+import { unliteral } from './textLayout';
 import { STYLE, SheetWriter, type PaperSize } from './writer';
 
 /**
@@ -13,7 +14,7 @@ import { STYLE, SheetWriter, type PaperSize } from './writer';
  */
 export async function renderSheet(model: SheetModel, paper: PaperSize, root: string): Promise<Buffer> {
   const writer = new SheetWriter(loadFonts(root), paper, {
-    title: `${sheetText.revisionOf(model.code, model.revision)}: ${plainText(model.question)}`,
+    title: `${sheetText.revisionOf(model.code, model.revision)}: ${unliteral(plainText(model.question))}`,
     author: model.author, subject: `Throughbond ${sheetText.sheet}`, at: model.at, banner: model.mark !== null,
   });
   writer.paragraph(model.question, STYLE.title, { x: writer.left, tag: 'H1', after: 1 });

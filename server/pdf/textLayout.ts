@@ -24,6 +24,12 @@ export interface Line {
 
 export type Measure = (text: string, face: Face, size: number, tabular: boolean) => number;
 
+/** Stands for an underscore that somebody typed, which is no markup; of the private use area, so that no text holds it by itself. */
+export const TYPED_UNDERSCORE = '\ue000';
+/** Text that is set as it stands: what people typed carries no markup. */
+export const literal = (typed: string): string => typed.replace(/_/g, TYPED_UNDERSCORE);
+export const unliteral = (text: string): string => text.replaceAll(TYPED_UNDERSCORE, '_');
+
 /** A character that no embedded face holds is printed by its code point: nothing that somebody typed is dropped in silence. */
 export function piecesOf(marked: string, style: TextStyle, fonts: FontBook): Piece[] {
   const pieces: Piece[] = [];
@@ -36,8 +42,9 @@ export function piecesOf(marked: string, style: TextStyle, fonts: FontBook): Pie
     const wanted = run.italic ? style.italic : style.face;
     for (const character of run.text) {
       if (character === '\n') { push('\n', wanted); continue; }
-      const face = fonts.faceFor(wanted, character === '\u2011' ? '-' : character);
-      if (face) push(character, face);
+      const shown = character === TYPED_UNDERSCORE ? '_' : character;
+      const face = fonts.faceFor(wanted, shown);
+      if (face) push(shown, face);
       else push(`[U+${character.codePointAt(0)!.toString(16).toUpperCase().padStart(4, '0')}]`, style.face);
     }
   }

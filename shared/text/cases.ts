@@ -1,9 +1,8 @@
+import { STATE_WORDS } from '../format/words';
 import type { CaseState } from '../types/case';
 
 /** Words of the server about cases: refusals, gaps before review, events of the log. `_x_` marks italics. */
-export const stateWord: Record<CaseState, string> = {
-  draft: 'draft', 'in-review': 'in review', queried: 'queried', signed: 'signed', superseded: 'superseded', withdrawn: 'withdrawn',
-};
+const stateWord = STATE_WORDS;
 
 const list = (items: readonly string[]): string =>
   items.length <= 1 ? (items[0] ?? '') : `${items.slice(0, -1).join(', ')} and ${items[items.length - 1]!}`;
@@ -26,6 +25,8 @@ export const casesText = {
   untitled: 'New question',
   wrongPassword: 'That is not your password. Nothing was signed.',
   passwordToSubmit: 'Type your password: sending to review signs the authorship of this revision.',
+  chooseBond: 'This structure has several double bonds: choose one in the quick look first.',
+  pastDay: 'This day is over: choose one from today on.',
   hashMismatch: 'The stored revision does not match its hash, so nothing was signed: tell an administrator.',
 
   refused: {
@@ -65,6 +66,7 @@ export const casesText = {
     noReading: 'Enter at least one measured coupling.',
     noCalculation: 'Calculate at least one reading: no relation has spoken yet.',
     unread: (what: string, sentence: string) => `${what} cannot be read: ${sentence}`,
+    noNumber: 'it holds no number. Type the splitting in Hz.',
     missingFact: (what: string, question: string) => `${what} needs one more fact: ${question}`,
     candidates: 'Name at least two candidates, or answer not decided: one candidate alone decides nothing.',
     candidateName: 'Name this candidate.',
@@ -86,6 +88,7 @@ export const casesText = {
     withdrawn: 'Withdrawn',
     reopened: 'Reopened as a draft',
     supersedeStarted: (code: string) => `${code} opened to supersede this case`,
+    reason: (event: string, reason: string) => `${event}. Reason: ${reason}`,
     superseded: (code: string) => `Superseded by ${code}`,
     commented: (label: string) => `Comment at ${label}`,
     resolved: (label: string) => `Comment at ${label} resolved`,

@@ -2,6 +2,7 @@
 export const sheetText = {
   sheet: 'summary sheet',
   revisionOf: (code: string, revision: number) => `${code}, revision ${revision}`,
+  unknownZone: 'No such time zone: name one as Europe/Berlin, or leave it out for UTC.',
   page: (page: number, pages: number) => `page ${page} of ${pages}`,
 
   answer: 'answer',

@@ -37,92 +37,101 @@ export interface CaseFacts {
   successor: string | null;
 }
 
+/** Why an act is refused: who asks, or where the case stands, or who holds it. */
+export interface Refusal {
+  kind: 'not-allowed' | 'wrong-state' | 'held-by-another';
+  sentence: string;
+}
+
 const RANK: Record<ProjectRole, number> = { reader: 1, chemist: 2, reviewer: 3, lead: 4 };
 const atLeast = (role: ProjectRole, floor: ProjectRole) => RANK[role] >= RANK[floor];
 const words = casesText.refused;
+const person = (sentence: string): Refusal => ({ kind: 'not-allowed', sentence });
+const standing = (sentence: string): Refusal => ({ kind: 'wrong-state', sentence });
+const held = (sentence: string): Refusal => ({ kind: 'held-by-another', sentence });
 const inReview = (state: CaseState) => state === 'in-review' || state === 'queried';
 
-function chemist(role: ProjectRole): string | null {
-  return atLeast(role, 'chemist') ? null : words.readerOnly;
+function chemist(role: ProjectRole): Refusal | null {
+  return atLeast(role, 'chemist') ? null : person(words.readerOnly);
 }
 
 /** May this person hold reviews of this case at all, whatever its state? */
-function independent(facts: CaseFacts, role: ProjectRole): string | null {
-  if (facts.isAuthor) return words.ownCase;
-  if (facts.savedRevision !== null) return words.savedRevision(facts.savedRevision);
-  if (!atLeast(role, facts.peerReview ? 'chemist' : 'reviewer')) return words.notReviewer;
+function independent(facts: CaseFacts, role: ProjectRole): Refusal | null {
+  if (facts.isAuthor) return person(words.ownCase);
+  if (facts.savedRevision !== null) return person(words.savedRevision(facts.savedRevision));
+  if (!atLeast(role, facts.peerReview ? 'chemist' : 'reviewer')) return person(words.notReviewer);
   return null;
 }
 
-function holder(facts: CaseFacts, role: ProjectRole): string | null {
+function holder(facts: CaseFacts, role: ProjectRole): Refusal | null {
   const dependent = independent(facts, role);
   if (dependent) return dependent;
-  if (!inReview(facts.state)) return words.notInReview(facts.state);
-  if (facts.heldBy) return words.heldBy(facts.heldBy.name, facts.heldBy.until);
-  return facts.isHolder ? null : words.takeFirst;
+  if (!inReview(facts.state)) return standing(words.notInReview(facts.state));
+  if (facts.heldBy) return held(words.heldBy(facts.heldBy.name, facts.heldBy.until));
+  return facts.isHolder ? null : standing(words.takeFirst);
 }
 
-const RULES: Record<CaseAct, (facts: CaseFacts, role: ProjectRole) => string | null> = {
-  edit: (facts, role) => chemist(role) ?? (facts.state === 'draft' || facts.state === 'queried' ? null : words.readOnly(facts.state)),
-  attach: (facts, role) => chemist(role) ?? (facts.state === 'draft' || facts.state === 'queried' ? null : words.readOnly(facts.state)),
-  comment: (facts, role) => chemist(role) ?? (facts.state === 'superseded' || facts.state === 'withdrawn' ? words.closed(facts.state) : null),
+const RULES: Record<CaseAct, (facts: CaseFacts, role: ProjectRole) => Refusal | null> = {
+  edit: (facts, role) => chemist(role) ?? (facts.state === 'draft' || facts.state === 'queried' ? null : standing(words.readOnly(facts.state))),
+  attach: (facts, role) => chemist(role) ?? (facts.state === 'draft' || facts.state === 'queried' ? null : standing(words.readOnly(facts.state))),
+  comment: (facts, role) => chemist(role) ?? (facts.state === 'superseded' || facts.state === 'withdrawn' ? standing(words.closed(facts.state)) : null),
   submit: (facts, role) => {
-    if (!facts.isAuthor) return words.authorSubmits;
+    if (!facts.isAuthor) return person(words.authorSubmits);
     const refused = chemist(role);
     if (refused) return refused;
-    if (facts.state !== 'draft' && facts.state !== 'queried') return words.alreadySent(facts.state);
-    return facts.openQueries.length > 0 ? words.answerFirst(facts.openQueries) : null;
+    if (facts.state !== 'draft' && facts.state !== 'queried') return standing(words.alreadySent(facts.state));
+    return facts.openQueries.length > 0 ? standing(words.answerFirst(facts.openQueries)) : null;
   },
   claim: (facts, role) => {
     const dependent = independent(facts, role);
     if (dependent) return dependent;
-    if (!inReview(facts.state)) return words.notInReview(facts.state);
-    if (facts.heldBy) return words.heldBy(facts.heldBy.name, facts.heldBy.until);
+    if (!inReview(facts.state)) return standing(words.notInReview(facts.state));
+    if (facts.heldBy) return held(words.heldBy(facts.heldBy.name, facts.heldBy.until));
     return null;
   },
   release: (facts, role) => {
-    if (!inReview(facts.state)) return words.notInReview(facts.state);
+    if (!inReview(facts.state)) return standing(words.notInReview(facts.state));
     if (facts.isHolder) return null;
-    if (!facts.heldBy) return words.nobodyHolds;
-    return role === 'lead' && !facts.isAuthor ? null : words.heldBy(facts.heldBy.name, facts.heldBy.until);
+    if (!facts.heldBy) return standing(words.nobodyHolds);
+    return role === 'lead' && !facts.isAuthor ? null : held(words.heldBy(facts.heldBy.name, facts.heldBy.until));
   },
   check: holder,
   query: holder,
   answerQuery: (facts, role) => {
-    if (!inReview(facts.state)) return words.notInReview(facts.state);
-    if (facts.openQueries.length + facts.answeredQueries.length === 0) return words.noQuery;
+    if (!inReview(facts.state)) return standing(words.notInReview(facts.state));
+    if (facts.openQueries.length + facts.answeredQueries.length === 0) return standing(words.noQuery);
     if (facts.isAuthor) return chemist(role);
-    return holder(facts, role) ? words.authorAnswers : null;
+    return holder(facts, role) ? person(words.authorAnswers) : null;
   },
   sign: (facts, role) => {
     const refused = holder(facts, role);
     if (refused) return refused;
     const unclosed = [...facts.openQueries, ...facts.answeredQueries].sort((a, b) => a - b);
-    if (unclosed.length > 0 || facts.uncheckedSteps.length > 0) return words.signOpens(unclosed, facts.uncheckedSteps);
-    if (!facts.revisionSubmitted || facts.state !== 'in-review') return words.changedUnsent;
+    if (unclosed.length > 0 || facts.uncheckedSteps.length > 0) return standing(words.signOpens(unclosed, facts.uncheckedSteps));
+    if (!facts.revisionSubmitted || facts.state !== 'in-review') return standing(words.changedUnsent);
     return null;
   },
   withdraw: (facts, role) => {
-    if (facts.state === 'superseded' || facts.state === 'withdrawn') return words.closed(facts.state);
+    if (facts.state === 'superseded' || facts.state === 'withdrawn') return standing(words.closed(facts.state));
     if (role === 'lead') return null;
-    return facts.isAuthor ? chemist(role) : words.authorOrLead;
+    return facts.isAuthor ? chemist(role) : person(words.authorOrLead);
   },
   supersede: (facts, role) => {
-    if (facts.state !== 'signed') return words.onlySigned;
-    if (role !== 'lead' && !(facts.isAuthor && atLeast(role, 'chemist'))) return words.authorOrLead;
-    return facts.successor ? words.successor(facts.successor) : null;
+    if (facts.state !== 'signed') return standing(words.onlySigned);
+    if (role !== 'lead' && !(facts.isAuthor && atLeast(role, 'chemist'))) return person(words.authorOrLead);
+    return facts.successor ? standing(words.successor(facts.successor)) : null;
   },
   reopen: (facts, role) => {
-    if (!inReview(facts.state)) return words.notInReview(facts.state);
+    if (!inReview(facts.state)) return standing(words.notInReview(facts.state));
     if (role === 'lead') return null;
-    return facts.isAuthor ? chemist(role) : words.authorOrLead;
+    return facts.isAuthor ? chemist(role) : person(words.authorOrLead);
   },
-  addend: (facts, role) => chemist(role) ?? (facts.state === 'signed' ? null : words.onlySigned),
+  addend: (facts, role) => chemist(role) ?? (facts.state === 'signed' ? null : standing(words.onlySigned)),
 };
 
-/** @returns null when the act is allowed now, else one sentence that says why it is not and what would open it */
-export function refusal(act: CaseAct, facts: CaseFacts): string | null {
-  if (facts.role === null) return words.notMember;
+/** @returns null when the act is allowed now, else one sentence that says why it is not and what would open it, with its kind */
+export function refusal(act: CaseAct, facts: CaseFacts): Refusal | null {
+  if (facts.role === null) return person(words.notMember);
   return RULES[act](facts, facts.role);
 }
 
@@ -131,9 +140,9 @@ export function abilities(facts: CaseFacts): Record<CaseAct, boolean> & { why: R
   const why: Record<string, string> = {};
   const may = {} as Record<CaseAct, boolean>;
   for (const act of CASE_ACTS) {
-    const sentence = refusal(act, facts);
-    may[act] = sentence === null;
-    if (sentence !== null) why[act] = sentence;
+    const refused = refusal(act, facts);
+    may[act] = refused === null;
+    if (refused) why[act] = refused.sentence;
   }
   return { ...may, why };
 }
