@@ -1,11 +1,11 @@
 // One project a kind of test: unit and outside are pure, components run on a DOM without layout, api meets a real
 // MariaDB, e2e drives the built product in Chromium.
-const transform = { '^.+\\.m?[tj]sx?$': '<rootDir>/esbuild-jest.cjs' };
+const transform = { '^.+\\.m?[tj]sx?$': '<rootDir>/esbuild-jest.cjs', '^.+\\.(png|ttf|woff2|svg)$': '<rootDir>/tests/setup/asset.cjs' };
 const alias = { '^@/(.*)$': '<rootDir>/$1' };
 
 // Packages that ship ES modules only.
 const esm = [
-  'd3-[a-z-]+', 'internmap', 'delaunator', 'robust-predicates', 'react-native-svg', 'expo[a-z-]*', '@expo/[a-z-]+', '@react-navigation/[a-z-]+',
+  'd3-[a-z-]+', 'internmap', 'delaunator', 'robust-predicates', 'react-native-svg', 'victory[a-z-]*', 'expo[a-z-]*', '@expo/[a-z-]+', '@react-navigation/[a-z-]+', 'standard-navigation',
   'file-type', 'strtok3', 'token-types', 'uint8array-extras', '@tokenizer/[a-z-]+', '@borewit/[a-z-]+', 'bcryptjs', 'openchemlib', 'fast-check', 'pure-rand', 'umzug', 'emittery',
 ];
 const transformIgnorePatterns = [`/node_modules/(?!(${esm.join('|')})/)`];
