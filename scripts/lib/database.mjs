@@ -1,8 +1,9 @@
 import { spawn } from 'node:child_process';
-import { chmodSync, chownSync, closeSync, existsSync, mkdirSync, mkdtempSync, openSync, readdirSync, readFileSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import { chmodSync, chownSync, closeSync, existsSync, mkdirSync, mkdtempSync, openSync, readFileSync, readdirSync, renameSync, rmSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { databaseAccount, hasDatabase } from './dataDir.mjs';
 import { findProgram } from './debian.mjs';
+import { readStamp } from './hash.mjs';
 import { takeLock } from './lock.mjs';
 import { SetupError, say } from './log.mjs';
 import { freePort, greets } from './port.mjs';
@@ -163,18 +164,29 @@ export async function openDatabase(dataDir, { mayJoin = false, fast = false, sch
   }
 }
 
+/**
+ * A folder for socket, pid file and the file of first statements; short, as a socket's path may have about 100
+ * characters only. The one of a start that was killed is cleared away.
+ */
+function makeRunDir(dataDir, account) {
+  const record = path.join(dataDir, 'run-dir');
+  const before = readStamp(record);
+  if (before && /^\/tmp\/throughbond-\w{6}$/.test(before)) rmSync(before, { recursive: true, force: true });
+  const runDir = mkdtempSync('/tmp/throughbond-');
+  writeFileSync(record, runDir);
+  chmodSync(runDir, 0o700);
+  if (account) chownSync(runDir, account.uid, account.gid);
+  return runDir;
+}
+
 async function start(dataDir, { lock, fast, schemas, account }) {
   for (const pid of serversOn(path.join(dataDir, 'mariadb'))) {
     say(`Stopping the database server that an earlier start left behind (process ${pid}).`);
-    const socket = readFileSync(`/proc/${pid}/cmdline`, 'utf8').split('\0').find((arg) => arg.startsWith('--socket=/tmp/throughbond-'));
     await stopProcess(pid, 60_000);
-    if (socket) rmSync(path.dirname(socket.slice('--socket='.length)), { recursive: true, force: true });
   }
   const fresh = !hasDatabase(dataDir);
   if (fresh) await createDatabase(dataDir, account);
-  const runDir = mkdtempSync('/tmp/throughbond-'); // short, as a socket's path may have about 100 characters only
-  chmodSync(runDir, 0o700);
-  if (account) chownSync(runDir, account.uid, account.gid);
+  const runDir = makeRunDir(dataDir, account);
   const port = await freePort();
   const init = initSql({ rootPassword: secretOf(dataDir, 'database-root'), ownerPassword: secretOf(dataDir, 'database-owner'), appPassword: secretOf(dataDir, 'database-app'), schemas });
   let stopping = false;
