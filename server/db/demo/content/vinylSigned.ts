@@ -91,7 +91,7 @@ export const vinylSigned: DemoCase[] = [
       readings: [reading('r1', ['H-3', 'H-4'], 'ca. 16', { se: '', where: '6.77 ppm, crude spectrum', note: 'H-4 under the aromatic signals.' })],
       calculations: [doubleBond('c1', 'r1', { left: [G.ketone, G.h], right: [G.aryl, G.h] })],
       candidates: eAndZ(),
-      answer: answer('assigned', 'e', 'E.', 'About 16 Hz is trans for two carbon groups even with an error of 1 Hz.', { leftOpen: 'Read on the crude; to be repeated on the pure product.' }),
+      answer: answer('tentative', 'e', 'E.', 'About 16 Hz is trans for two carbon groups, but the error of 1 Hz reaches towards the open band.', { leftOpen: 'Read on the crude; to be repeated on the pure product.' }),
       tags: ['ketone', 'crude'],
     }),
     acts: [

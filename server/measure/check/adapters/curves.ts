@@ -22,7 +22,7 @@ interface Substituent {
 export const curveAt = (relation: string): Adapter => async (given, api) => {
   const stranger = unknownKey(given, ['path', 'phi_deg']);
   if (stranger !== undefined) return notCovered(`${stranger} has no place in the product yet`);
-  if (given.path !== undefined && given.path !== PATH) return notCovered(`no relation for the path ${String(given.path)} yet`);
+  if (given.path !== undefined && given.path !== PATH) return notCovered(`no relation for the path ${JSON.stringify(given.path)} yet`);
   return evaluate(api, { relation, phiDeg: given.phi_deg });
 };
 

@@ -1,3 +1,4 @@
+import { asNumber, asText } from '../../lib/read';
 import { type Adapter, notCovered, unknownKey } from './adapter';
 import { askQuickLook } from './quickLook';
 
@@ -16,7 +17,8 @@ export const inputGate: Adapter = async (given, api) => {
   const stranger = unknownKey(given, ['J', 'coupling', 'sigma', 'spectrometer_MHz', 'structure', 'unit']);
   if (stranger !== undefined) return notCovered(`${stranger} has no place in the product yet`);
   const form = formFor(given.coupling, given.structure);
-  if (form === undefined) return notCovered(`no form takes ${String(given.coupling)} yet`);
-  const j = given.J !== null && given.J !== undefined && given.unit !== undefined ? `${String(given.J)} ${String(given.unit)}` : given.J;
-  return askQuickLook(api, { ...form, j, se: given.sigma, fieldMHz: given.spectrometer_MHz });
+  if (form === undefined) return notCovered(`no form takes ${JSON.stringify(given.coupling)} yet`);
+  const j = asNumber(given.J) ?? asText(given.J);
+  const unit = asText(given.unit);
+  return askQuickLook(api, { ...form, j: j !== undefined && unit !== undefined ? `${j} ${unit}` : given.J, se: given.sigma, fieldMHz: given.spectrometer_MHz });
 };
