@@ -15,6 +15,7 @@ import { openDatabase } from './db/sequelize';
 import type { Deps } from './deps';
 import { neededDatabaseUrl, SettingError, type Env } from './env';
 import type { Log } from './http/log';
+import { countWaiting } from './features/reviews/read';
 import { keepLetter } from './mail/mailbox';
 import { relationRegistry } from './relations/registry';
 import { createMailer, localSender, smtpSender } from './mail/mailer';
@@ -32,7 +33,7 @@ export function makeDeps(env: Env, log: Log, passwords: Passwords, now: () => Da
     sessions: createSessions({ db, secret: sessionSecret(env.dataDir), now }),
     mail: createMailer(send, log),
     relations: relationRegistry(),
-    reviewsWaiting: () => Promise.resolve(0),
+    reviewsWaiting: (pool, who) => countWaiting(pool, who, now()),
   };
 }
 

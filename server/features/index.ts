@@ -3,6 +3,7 @@ import { docsRoutes } from '@/server/http/docs/routes';
 import type { Route } from '@/server/http/route';
 import { accountRoutes } from './account/routes';
 import { adminRoutes } from './admin/routes';
+import { caseFeatureRoutes } from './cases/wire';
 import { healthRoutes } from './health/routes';
 import { mailboxRoutes } from './mailbox/routes';
 import { quickLookRoutes } from './quickLook/routes';
@@ -22,6 +23,7 @@ export function allRoutes(deps: Deps): Route[] {
     ...accountRoutes(deps),
     ...teamRoutes(deps),
     ...adminRoutes(deps),
+    ...caseFeatureRoutes(deps),
     ...mailboxRoutes(deps),
     ...docsRoutes(() => routes),
   ];

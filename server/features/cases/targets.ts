@@ -22,12 +22,12 @@ function rowLabel(content: CaseContent, list: List, rowId: string): string | nul
 
 /**
  * The name of the value that a comment stands at. A target is the path of a value in the content (`question`,
- * `compound/name`, `readings/<row id>/j`) or the key of a step of the trail; null when the case holds no such value.
+ * `compound/name`, `readings/<row id>/j`, with `.` as well) or the key of a step of the trail; null when the case holds no such value.
  */
 export function targetLabel(target: string, content: CaseContent, trail: CaseTrail): string | null {
   const step = trail.steps.find(({ key }) => key === target);
   if (step) return step.title;
-  const [head = '', rowId = '', field = ''] = target.replace(/^[#/]+/, '').split('/');
+  const [head = '', rowId = '', field = ''] = target.replace(/^[#/]+/, '').split(/[/.]/);
   if (head === 'case') return words.whole;
   if (isList(head)) {
     if (rowId === '') return capitalWord(head);
