@@ -1,7 +1,7 @@
 import { queryOptions, useMutation, useQuery } from '@tanstack/react-query';
 import { useMemo } from 'react';
 
-import type { RelationSummary, RelationsResponse } from '@/shared/contracts/relations';
+import type { EvaluateResponse, RelationSummary, RelationsResponse } from '@/shared/contracts/relations';
 import { ENGINE_VERSION } from '@/shared/engine/version';
 import { apiText } from '@/shared/text/uiApi';
 
@@ -50,4 +50,4 @@ export interface EvaluateInput { relation: string; phiDeg: number; groups?: { fr
 
 /** J from φ by the server, whose number is the one to quote. */
 export const useEvaluate = () =>
-  useMutation({ mutationFn: (input: EvaluateInput) => api.post('/api/relations/evaluate', input, 'evaluateResponse') });
+  useMutation<EvaluateResponse, ApiProblem, EvaluateInput>({ mutationFn: (input) => api.post('/api/relations/evaluate', input, 'evaluateResponse') });

@@ -7,7 +7,7 @@ export const relationText = {
   formula: 'Formula',
   noFormula: 'A table of measured values by class, not an equation.',
   curve: 'Curve',
-  curveFor: 'Curve for these groups',
+  curveGroups: (front: string, rear: string) => `Drawn for front ${front}; rear ${rear}.`,
   curveLabel: (low: string, high: string) => `Curve of J against the dihedral angle; it reaches from ${low} to ${high} hertz`,
   noCurve: 'No curve with these groups: the relation does not speak about them.',
   spread: (spread: string) => `spread ${spread}`,

@@ -1,0 +1,101 @@
+/** The one help page and the glossary. */
+export interface HelpPart { id: string; title: string; sentences: readonly string[] }
+
+export const helpText = {
+  title: 'Help',
+  glossary: 'Glossary',
+  glossaryLead: 'What the words here mean, exactly.',
+  toGlossary: 'To the glossary',
+  toHelp: 'To the help page',
+  onThisPage: 'On this page',
+  term: 'Term',
+  meaning: 'Meaning here',
+  parts: [
+    {
+      id: 'answer',
+      title: 'How to read an answer',
+      sentences: [
+        'The first word is the grade. assigned: one geometry fits and the others held do not. tentative: one is favoured, but a number or a step is not strong enough. not decided: this _J_ does not tell, and the next measurement is named.',
+        'A filled mark and a solid bar stand for assigned, a half-filled mark and a dashed bar for tentative, an open mark and an outlined bar for not decided.',
+        'Three inks: a blue square is measured, a green circle is calculated by a relation, a brown diamond is what a person judged. Nobody judges in a quick look.',
+        'An angle from one _J_ is tentative at most, because several angles give the same value.',
+        'Arcs are the angles allowed at 95 in 100 when the error of the reading and the spread of the relation are taken together. Roots are the angles of the value itself.',
+        'Odds are those of the class of double bonds at hand, between the geometries it holds. They say nothing of a wrong structure.',
+      ],
+    },
+    {
+      id: 'cannot',
+      title: 'What it cannot tell',
+      sentences: [
+        '_J_ gives relative geometry, not absolute configuration. R or S needs another source.',
+        'A bond that turns shows an average over its forms. The _J_ of an average is not the _J_ of a mean angle.',
+        'A spacing is a coupling only in first order. Where the shift difference is small against _J_, read the spin system first.',
+        'A relation speaks only about the paths it was made for. Outside its domain the answer says so and gives no angle.',
+        'Numbers from memory or common practice are marked, and an answer that leans on one is tentative at most.',
+      ],
+    },
+    {
+      id: 'typing',
+      title: 'Typing a reading',
+      sentences: [
+        '9.6, 9,6 and 9.6 Hz are all read. “ca. 7” is read as 7 ± 1. “< 1.5” is an interval from 0, never a value. What was understood stands under the field.',
+        '± is one standard error of the reading. Without one, 0.2 Hz stands; that is common practice, not a measurement of your spectrum.',
+        'A value below 0.3 is taken for a distance in ppm: type the field, and the same line in Hz is offered.',
+        'Groups are named by their first atom and its other neighbours, H included. All four are needed before the generalised equation runs.',
+        'Clockwise and counter-clockwise are as seen along the bond from the front carbon, counted from the coupled H of each carbon.',
+      ],
+    },
+    {
+      id: 'keyboard',
+      title: 'Keyboard',
+      sentences: [
+        'Tab moves on, Shift and Tab back. Enter or the space bar presses what is reached; Esc closes a sheet.',
+        'On the dial, the arrow keys turn by 1°, Page Up and Page Down by 15°. The buttons beside it turn by 5°.',
+        'In a row of choices the arrow keys move. Every plot has a table of the same values beneath it.',
+      ],
+    },
+    {
+      id: 'cautions',
+      title: 'Cautions',
+      sentences: [
+        'A caution is raised by a rule and limits the answer. It can be answered in a case, not switched off.',
+        'Value near the border between cis and trans: electronegative groups lower both, so compare with the other isomer.',
+        'Small rings: ranges of cis and trans couplings overlap or change places; ³_J_ alone does not decide there.',
+        'Three or four groups on a double bond: there is no H,H pair across it. Measure ³_J_(C,H) of both isomers, and NOE.',
+        'Partners that differ by more than their errors: one splitting is misread, or they do not couple. No answer is given for the pair.',
+      ],
+    },
+    {
+      id: 'cases',
+      title: 'Cases and review',
+      sentences: [
+        'A case holds one stereochemical question about one compound: readings, calculations, candidates, evidence, and the answer a person gives with reasons.',
+        'Every change is saved as a revision and can be compared with any other. What is typed is kept on this device until the server has it.',
+        'A reviewer who is not the author goes through five checks, asks where something is open, and signs. The signature holds the hash of the content.',
+        'A signed revision stays as it is. New facts make an addendum, or a new case that supersedes it.',
+      ],
+    },
+  ] satisfies readonly HelpPart[],
+  terms: [
+    ['Scalar coupling ⁿ_J_; splitting', 'Interaction of two nuclei through n bonds, in Hz, independent of the field, with a sign, one value a pair. A splitting is a distance between lines; it equals the size of _J_ only in first order.'],
+    ['First order, second order', 'First order: the shift difference of every coupled pair is much larger than its _J_ at that field. Otherwise second order: the lines must be fitted as a spin system.'],
+    ['Geminal, vicinal, long-range', 'Across two bonds (²_J_), three (³_J_), four and more.'],
+    ['Dihedral angle _φ_', 'Signed angle of the path A–B–C–D, from −180° to 180°; clockwise is positive, seen along the middle bond. Most relations see its size only.'],
+    ['Relation; version; domain', 'A published _J_(_φ_) or table of values, with its parameters, error and source. A changed digit is a new version. The domain is the set of paths it was made for; outside it there is no answer.'],
+    ['Root', 'An angle at which the relation gives the measured value exactly. Usually there are several.'],
+    ['Arc', 'A stretch of angles allowed by the reading and its error together with the spread of the relation.'],
+    ['Spread', 'How far a relation misses measured values inside its domain, as one standard deviation in Hz.'],
+    ['sp, sc, ac, ap', 'Names of stretches of _φ_: synperiplanar up to 30°, synclinal 30° to 90°, anticlinal 90° to 150°, antiperiplanar from 150°.'],
+    ['cis, trans; _E_, _Z_', 'cis and trans: same side or opposite sides, with the two H of the coupling as reference. E and Z follow the priority of the groups. They are not the same question.'],
+    ['Averaged _J_', 'Mean over forms in fast exchange, weighted by their populations. It is not the _J_ of the mean angle.'],
+    ['Reading, pair, orphan', 'A measured coupling. Two readings of one _J_ make a pair; one whose partner was not read is an orphan.'],
+    ['Candidate', 'A structure or form in question. “None of these” always stands among them.'],
+    ['Answer: assigned, tentative, not decided', 'The conclusion with its grade, what it rules out and what it cannot tell. “Not decided” is a result, with what to measure next.'],
+    ['Odds', 'Here: the weight of a geometry by the values held for its class, in a hundred.'],
+    ['Trail', 'The chain from a printed number to what was typed, the relation and its version, the person and the time.'],
+    ['Caution', 'A statement raised by a rule that limits an answer.'],
+    ['Relative, absolute', 'Relative: which diastereomer. Absolute: which enantiomer; couplings never tell.'],
+    ['Revision, signature, addendum', 'A saved state of a case; a name bound to the hash of a revision with a meaning; a new signed text beside a locked record.'],
+    ['Seen, common practice, from memory', 'Where a number comes from: read in a public text; usual in the trade without a source; recalled without the paper.'],
+  ] satisfies readonly (readonly [string, string])[],
+} as const;
