@@ -1,9 +1,9 @@
 import { all, create } from 'mathjs';
 
-import { effectiveDchi } from '../../shared/engine/relations/generalised';
-import { bindCurve, jAt } from '../../shared/engine/relations/curve';
-import { studentDensity } from '../../shared/engine/math/student';
-import type { AngleRow, ParameterSet, RelationRow, Substituent } from '../../shared/types/relation';
+import { effectiveDchi } from '@/shared/engine/relations/generalised';
+import { bindCurve, jAt } from '@/shared/engine/relations/curve';
+import { studentDensity } from '@/shared/engine/math/student';
+import type { AngleRow, ParameterSet, RelationRow, Substituent } from '@/shared/types/relation';
 
 const math = create(all ?? {});
 const RADIANS = Math.PI / 180;

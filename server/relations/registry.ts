@@ -1,8 +1,8 @@
 import { z } from 'zod';
 
-import { registryFrom } from '../../shared/engine/relations/registry';
-import { tableRows } from '../../shared/engine/relations/tables';
-import type { Registry, RelationRow } from '../../shared/types/relation';
+import { registryFrom } from '@/shared/engine/relations/registry';
+import { tableRows } from '@/shared/engine/relations/tables';
+import type { Registry, RelationRow } from '@/shared/types/relation';
 import { verifyPrintedFormula } from './printedFormula';
 import { relationRow } from './schema';
 

@@ -1,9 +1,9 @@
-import type { RelationSummary } from '../../shared/contracts/relations';
-import { evaluate } from '../../shared/engine/relations/curve';
-import { relationRef } from '../../shared/engine/quick/refs';
-import { hzRange, hz } from '../../shared/format/number';
-import { relationsText } from '../../shared/text/engine/relations';
-import type { RelationRow } from '../../shared/types/relation';
+import type { RelationSummary } from '@/shared/contracts/relations';
+import { evaluate } from '@/shared/engine/relations/curve';
+import { relationRef } from '@/shared/engine/quick/refs';
+import { hzRange, hz } from '@/shared/format/number';
+import { relationsText } from '@/shared/text/engine/relations';
+import type { RelationRow } from '@/shared/types/relation';
 
 /** A relation as the Relations page shows it; checks are calculated by the same engine that answers. */
 export function relationSummary(row: RelationRow): RelationSummary {

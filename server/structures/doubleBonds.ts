@@ -1,6 +1,6 @@
-import type { RingSize } from '../../shared/types/answer';
-import type { GroupText } from '../../shared/types/group';
-import { groupLabel, groupOf, parseGroup, printGroup } from '../../shared/engine';
+import type { RingSize } from '@/shared/types/answer';
+import type { GroupText } from '@/shared/types/group';
+import { groupLabel, groupOf, parseGroup, printGroup } from '@/shared/engine';
 
 type Ocl = typeof import('openchemlib');
 type Molecule = InstanceType<Ocl['Molecule']>;

@@ -15,3 +15,7 @@ export { groupOf, isHydrogen, parseGroup, printGroup, type GroupFault } from './
 export { GROUP_PRESETS, groupLabel, type GroupPreset } from './groups/presets';
 export { comparePriority } from './groups/priority';
 export type { Registry } from '../types/relation';
+export { caseTrail } from './trail/caseTrail';
+export { diffContent, type FieldChange } from './trail/diffContent';
+export { canonicalJson } from './trail/canonicalJson';
+export { contentFromQuickLook } from './trail/fromQuickLook';

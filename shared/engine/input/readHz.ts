@@ -1,6 +1,6 @@
 import type { FieldName, FieldProblem, HzReading, InputNote, Mend } from '../../types/reading';
 import { inputText as say } from '../../text/engine/input';
-import { fixed, hz } from '../../format/number';
+import { fixed } from '../../format/number';
 
 /** One standard error where none is typed, in hertz (common practice, no source). */
 export const DEFAULT_SE_HZ = 0.2;
@@ -188,6 +188,3 @@ export function readField(typed: string | undefined): { fieldMHz: number | null 
 
 /** For mends and choices: a size as it was typed, without the sign. */
 export const sizeText = (reading: HzReading): string => Math.abs(reading.jHz).toFixed(reading.decimals);
-
-/** For sentences: the default error with its unit. */
-export const defaultErrorText = (): string => hz(DEFAULT_SE_HZ);

@@ -1,7 +1,7 @@
 import type { CautionId, DoubleBondFinding, DoubleBondInput, Grade, NextMeasurement, QuickLookAnswer } from '../../types/answer';
 import type { AlkeneModel } from '../../types/relation';
 import type { TrailStep } from '../../types/trail';
-import { hz, hzRange, inHundred } from '../../format/number';
+import { hzRange, inHundred } from '../../format/number';
 import { singleText } from '../../text/engine/single';
 import { doubleText as say } from '../../text/engine/double';
 import type { AlkeneGroups, AlkeneKind } from '../alkenes/classify';
@@ -93,6 +93,3 @@ export function doubleAnswer(context: DoubleContext, v: DoubleVerdict): QuickLoo
     relation, single: null, double: v.finding, steps,
   };
 }
-
-/** For sentences: the size of a gap, never negative. */
-export const gapText = (from: number, to: number): string => hz(Math.abs(to - from));

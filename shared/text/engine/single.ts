@@ -1,5 +1,5 @@
 import type { Hz } from '../../types/units';
-import { degree, fixed, hz, hzRange, inHundred, NBSP } from '../../format/number';
+import { fixed, hz, hzRange, inHundred, NBSP } from '../../format/number';
 import type { DomainReason } from '../../engine/relations/applies';
 
 const list = (words: readonly string[]): string =>
@@ -114,5 +114,4 @@ export const singleText = {
     giveGroups: { id: 'give-groups', title: 'The groups on both carbons', detail: 'Then the generalised equation applies, with a spread of 0.5 Hz in place of 3.' },
     cosy: { id: 'cosy', title: 'COSY cross peak of the pair', detail: 'It shows which two H couple; read both splittings again there.' },
   },
-  formula: { degree, fixed },
 } as const;
