@@ -36,7 +36,14 @@ export default tseslint.config(
     rules: {
       'react-hooks/rules-of-hooks': 'error',
       'react-hooks/exhaustive-deps': 'error',
-      'no-restricted-imports': ['error', { patterns: [{ regex: '^(@/|\\.\\./+)server/', message: 'The client meets the server through shared/contracts only.' }] }],
+      'no-restricted-imports': ['error', {
+        paths: [{
+          name: 'react-native',
+          importNames: ['FlatList', 'SectionList', 'VirtualizedList', 'Button', 'CheckBox', 'Picker', 'ProgressBar', 'ImageBackground', 'YellowBox', 'TouchableHighlight', 'TouchableNativeFeedback', 'TouchableOpacity', 'TouchableWithoutFeedback'],
+          message: 'Left out of the web bundle for its size, see assets/bundle/nativeUnused.js.',
+        }],
+        patterns: [{ regex: '^(@/|\\.\\./+)server/', message: 'The client meets the server through shared/contracts only.' }],
+      }],
     },
   },
   {

@@ -1,6 +1,6 @@
 // Metro bundles the web client. Three things differ from Expo's defaults: folders that never belong to the
-// client are out of its sight, the parts of zod that a browser never needs are replaced by small
-// stand-ins, and in development /api goes to the server, so that cookies stay same-origin.
+// client are out of its sight, parts of zod and react-native-web that it never needs are replaced by
+// small stand-ins, and in development /api goes to the server, so that cookies stay same-origin.
 const http = require('node:http');
 const path = require('node:path');
 const { getDefaultConfig } = require('expo/metro-config');
@@ -13,13 +13,16 @@ const outside = ['server', 'tests', 'scripts', 'build', 'dist', '.data', 'docs',
   .map((folder) => new RegExp(`^${escaped(path.join(root, folder) + path.sep)}`));
 config.resolver.blockList = [].concat(config.resolver.blockList ?? [], outside);
 
-const zodFolder = path.join(root, 'node_modules', 'zod', 'v4') + path.sep;
-const standIn = (file) => path.join(root, 'assets', 'bundle', file);
+/** Files of packages, each with what stands in for it in the bundle. */
+const inPackage = (folder, files, by) => files.map((file) => [path.join(root, 'node_modules', folder, file), path.join(root, 'assets', 'bundle', by)]);
 const replaced = new Map([
-  ['locales/index.js', standIn('zodLocales.js')],
-  ...['core/compile.js', 'core/to-json-schema.js', 'core/json-schema-processors.js', 'core/json-schema-generator.js', 'classic/from-json-schema.js']
-    .map((file) => [file, standIn('zodUnused.js')]),
-].map(([file, by]) => [zodFolder + file.split('/').join(path.sep), by]));
+  ...inPackage('zod/v4', ['locales/index.js'], 'zodLocales.js'),
+  ...inPackage('zod/v4', ['core/compile.js', 'core/to-json-schema.js', 'core/json-schema-processors.js', 'core/json-schema-generator.js', 'classic/from-json-schema.js'], 'zodUnused.js'),
+  ...inPackage('react-native-web/dist/exports', [
+    'FlatList', 'SectionList', 'VirtualizedList', 'Button', 'CheckBox', 'Picker', 'ProgressBar', 'ImageBackground', 'YellowBox',
+    'TouchableHighlight', 'TouchableNativeFeedback', 'TouchableOpacity', 'TouchableWithoutFeedback',
+  ].map((name) => `${name}/index.js`), 'nativeUnused.js'),
+]);
 const resolveBefore = config.resolver.resolveRequest;
 config.resolver.resolveRequest = (context, name, platform) => {
   const found = (resolveBefore ?? context.resolveRequest)(context, name, platform);
