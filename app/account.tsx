@@ -1,4 +1,4 @@
-import { AccountScreen } from '@/components/account/AccountScreen';
+import { AccountScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   return <AccountScreen />;

@@ -1,4 +1,4 @@
-import { AdminScreen } from '@/components/admin/AdminScreen';
+import { AdminScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   return <AdminScreen />;

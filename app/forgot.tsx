@@ -1,4 +1,4 @@
-import { ForgotScreen } from '@/components/auth/ForgotScreen';
+import { ForgotScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   return <ForgotScreen />;

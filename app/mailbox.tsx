@@ -1,4 +1,4 @@
-import { MailboxScreen } from '@/components/mailbox/MailboxScreen';
+import { MailboxScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   return <MailboxScreen />;

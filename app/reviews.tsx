@@ -1,4 +1,4 @@
-import { ReviewsScreen } from '@/components/reviews/ReviewsScreen';
+import { ReviewsScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   return <ReviewsScreen />;

@@ -1,4 +1,4 @@
-import { SignInScreen } from '@/components/auth/SignInScreen';
+import { SignInScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   return <SignInScreen />;

@@ -1,4 +1,4 @@
-import { CasesScreen } from '@/components/cases/CasesScreen';
+import { CasesScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   return <CasesScreen />;

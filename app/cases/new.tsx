@@ -1,4 +1,4 @@
-import { NewCaseScreen } from '@/components/cases/NewCaseScreen';
+import { NewCaseScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   return <NewCaseScreen />;

@@ -1,6 +1,6 @@
 import { useLocalSearchParams } from 'expo-router';
 
-import { InvitationScreen } from '@/components/auth/InvitationScreen';
+import { InvitationScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   const { token } = useLocalSearchParams<{ token: string }>();

@@ -1,6 +1,6 @@
 import { useLocalSearchParams } from 'expo-router';
 
-import { ResetScreen } from '@/components/auth/ResetScreen';
+import { ResetScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   const { token } = useLocalSearchParams<{ token: string }>();

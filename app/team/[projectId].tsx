@@ -1,6 +1,6 @@
 import { useLocalSearchParams } from 'expo-router';
 
-import { ProjectScreen } from '@/components/team/ProjectScreen';
+import { ProjectScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   const { projectId } = useLocalSearchParams<{ projectId: string }>();

@@ -1,4 +1,4 @@
-import { TeamScreen } from '@/components/team/TeamScreen';
+import { TeamScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   return <TeamScreen />;

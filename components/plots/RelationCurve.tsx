@@ -2,13 +2,12 @@ import { useMemo } from 'react';
 import { View } from 'react-native';
 
 import { degree, fixed } from '@/shared/format/number';
-import { relationText } from '@/shared/text/relations';
+import { quickText } from '@/shared/text/quick';
+import type { CurveInputs } from '@/shared/engine/relations/curve';
 
 import { useLayout } from '../theme/useLayout';
 import { Table } from '../ui/Table';
 import { Disclosure } from '../ui/Disclosure';
-import { quickText } from '@/shared/text/quick';
-import type { CurveInputs } from '@/shared/engine/relations/curve';
 import { Curve } from './Curve';
 import { PlotBox } from './PlotBox';
 import { useDeviceCurve } from './useDeviceCurve';
@@ -29,12 +28,12 @@ export function RelationCurve({ relation, spreadHz, inputs, at = null }: Relatio
   const { isWide } = useLayout();
   const height = isWide ? 320 : 250;
   const rows = useMemo(() => curve?.points.filter((point) => Math.round(point.phiDeg) % 30 === 0) ?? [], [curve]);
-  if (!curve) return <PlotBox bond="single" height={height} note={isPending ? quickText.plotsLoading : relationText.noCurve} />;
+  if (!curve) return <PlotBox bond="single" height={height} note={isPending ? quickText.plotsLoading : quickText.noCurve} />;
   const say = quickText.columns;
   return (
     <View>
       <View onLayout={onLayout} style={{ minHeight: height, marginHorizontal: 16 }}>
-        {width > 0 && <Curve width={width} height={height} points={curve.points} spreadHz={spreadHz} reading={null} roots={[]} arcs={[]} shown={at} label={relationText.curveLabel(fixed(curve.reach.minHz, 1), fixed(curve.reach.maxHz, 1))} />}
+        {width > 0 && <Curve width={width} height={height} points={curve.points} spreadHz={spreadHz} reading={null} roots={[]} arcs={[]} shown={at} label={quickText.relationCurveLabel(fixed(curve.reach.minHz, 1), fixed(curve.reach.maxHz, 1))} />}
       </View>
       <Disclosure label={quickText.relationTable} openLabel={quickText.hideTable}>
         <Table caption={quickText.tableCurve} rows={rows} rowKey={(point) => String(point.phiDeg)} columns={[

@@ -15,14 +15,16 @@ import { Text } from '../ui/Text';
 import type { ApiProblem } from '../data/problems';
 
 /** The strip in each of its states: nothing typed, refused in place, one more fact needed, an answer (stale or not), no server. */
-export function AnswerPart({ asked, answer, problem, waiting, setField, onRetry, onCopyText }: {
+export function AnswerPart({ asked, answer, problem, waiting, setField, onRetry, onCopyText, onGroups }: {
   asked: boolean; answer: QuickLookResponse | undefined; problem: ApiProblem | null; waiting: boolean;
   setField: (field: string, value: string) => void; onRetry: () => void; onCopyText?: () => void;
+  /** opens the groups, where the question is about them */
+  onGroups?: () => void;
 }) {
   return (
     <View>
       <LiveRegion message={waiting ? '' : spokenOf(asked, answer, problem)} />
-      <Strip asked={asked} answer={answer} problem={problem} waiting={waiting} setField={setField} onRetry={onRetry} onCopyText={onCopyText} />
+      <Strip asked={asked} answer={answer} problem={problem} waiting={waiting} setField={setField} onRetry={onRetry} onCopyText={onCopyText} onGroups={onGroups} />
     </View>
   );
 }
@@ -34,7 +36,7 @@ function spokenOf(asked: boolean, answer: QuickLookResponse | undefined, problem
   return answer.state === 'question' ? plainText(answer.question) : quickText.spoken(GRADE_WORDS[answer.grade], plainText(answer.headline));
 }
 
-function Strip({ asked, answer, problem, waiting, setField, onRetry, onCopyText }: Parameters<typeof AnswerPart>[0]) {
+function Strip({ asked, answer, problem, waiting, setField, onRetry, onCopyText, onGroups }: Parameters<typeof AnswerPart>[0]) {
   if (!asked) return <AnswerAsks headline={quickText.begin} detail={quickText.beginDetail} />;
   if (problem?.is('invalid-input')) return <AnswerAsks tone="refusal" headline={quickText.refused} detail={problem.errors[0]?.detail ?? problem.detail} />;
   if (problem) {
@@ -50,6 +52,7 @@ function Strip({ asked, answer, problem, waiting, setField, onRetry, onCopyText 
       <AnswerAsks tone="question" headline={answer.question} detail={answer.why}>
         <View style={styles.buttons}>
           {answer.choices.map((choice) => <Button key={`${choice.field}${choice.value}`} small label={choice.label} onPress={() => setField(choice.field, choice.value)} />)}
+          {answer.field.startsWith('groups') && onGroups && <Button small label={quickText.groupsTitle} opens="dialog" onPress={onGroups} />}
         </View>
       </AnswerAsks>
     );
@@ -60,7 +63,7 @@ function Strip({ asked, answer, problem, waiting, setField, onRetry, onCopyText 
       {odds.length > 1 && (
         <Text kind="small" tone="muted">{odds.map((entry) => quickText.odds(inHundred(entry.weight), quickText.geometry[entry.geometry])).join(' · ')}</Text>
       )}
-      {onCopyText && <View style={styles.buttons}><Button small kind="quiet" label={quickText.copyText} onPress={onCopyText} /></View>}
+      {onCopyText && <View style={styles.buttons}><Button small label={quickText.copyText} onPress={onCopyText} /></View>}
     </AnswerStrip>
   );
 }

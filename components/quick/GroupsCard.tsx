@@ -14,7 +14,7 @@ import type { SayOf } from './ReadingCard';
 import type { Slot } from './slots';
 
 const GroupsSheet = lazy(async () => ({ default: (await import('./GroupsSheet')).GroupsSheet }));
-const RelationSheet = lazy(async () => ({ default: (await import('./RelationSheet')).RelationSheet }));
+const RelationSheet = lazy(async () => ({ default: (await import('../plots/entry')).RelationSheet }));
 
 export type OpenPart = { part: 'groups'; slot?: Slot } | { part: 'turning' } | { part: 'relation' } | null;
 const TURNINGS = ['free', 'ring', 'unknown'] as const;

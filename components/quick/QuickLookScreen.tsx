@@ -43,23 +43,30 @@ export function QuickLookScreen() {
         ? <GroupsCard form={form} set={set} say={say} relation={answered?.relation ?? null} open={open} onOpen={setOpen} />
         : <DoubleBondCard form={form} set={set} say={say} />}
       <AnswerPart asked={asked} answer={answer?.bond === form.bond ? answer : undefined} problem={problem} waiting={waiting} setField={setField}
-        onRetry={() => void refetch()} onCopyText={answered ? () => copy(copyText(answered, link())) : undefined} />
+        onRetry={() => void refetch()} onCopyText={answered ? () => copy(copyText(answered, link())) : undefined}
+        onGroups={form.bond === 'single' ? () => setOpen({ part: 'groups' }) : undefined} />
       {copyPart}
     </>
   );
   const plots = plotted && asked && !problem && (
     <LazyAnswerPlots answer={plotted} groups={groups} onPickGroup={(slot) => setOpen({ part: 'groups', slot })} />
   );
-  const findings = answered && asked && !problem && (
-    <Stack>
-      <Plan title={quickText.checkFirst} items={answered.checkFirst} />
-      <Plan title={quickText.wouldDecide} items={answered.measureNext} numbered />
-      <Sentences title={quickText.rulesOut} sentences={answered.rulesOut} />
-      <Sentences title={quickText.cannotTell} sentences={answered.cannotTell} />
-      <Cautions cautions={answered.cautions} />
-      <TrailFold steps={answered.steps} />
-    </Stack>
+  const shown = asked && !problem ? answered : null;
+  const plan = shown && (
+    <>
+      <Plan title={quickText.checkFirst} items={shown.checkFirst} />
+      <Plan title={quickText.wouldDecide} items={shown.measureNext} numbered />
+    </>
   );
+  const limits = shown && (
+    <>
+      <Sentences title={quickText.rulesOut} sentences={shown.rulesOut} />
+      <Sentences title={quickText.cannotTell} sentences={shown.cannotTell} />
+      <Cautions cautions={shown.cautions} />
+    </>
+  );
+  const trail = shown && <TrailFold steps={shown.steps} />;
+  const anew = asked && <View style={styles.clear}><Button kind="plain" small label={quickText.startAnew} onPress={clear} /></View>;
   const actions = (
     <>
       <Button grow={1} label={copied ? quickText.copied : quickText.copyLink} onPress={() => copy(link())} />
@@ -69,8 +76,8 @@ export function QuickLookScreen() {
   return (
     <Screen title={quickText.title} actions={actions} aside={isWide ? (asked ? quickText.notSaved : quickText.nothingTyped) : undefined}>
       {isWide
-        ? <Columns side="first" narrow={size.intake} first={<>{inputs}{asked && <View style={styles.clear}><Button kind="quiet" small label={quickText.startAnew} onPress={clear} /></View>}</>} second={<>{plots}{findings}</>} />
-        : <Stack>{inputs}{plots}{findings}{asked && <View style={styles.clear}><Button kind="quiet" label={quickText.startAnew} onPress={clear} /></View>}</Stack>}
+        ? <Columns side="first" narrow={size.intake} first={<>{inputs}{limits}{anew}</>} second={<>{plots}{plan}{trail}</>} />
+        : <Stack>{inputs}{plots}{plan}{limits}{trail}{anew}</Stack>}
     </Screen>
   );
 }

@@ -10,6 +10,7 @@ import { Card } from '../ui/Card';
 import { Disclosure } from '../ui/Disclosure';
 import { Field, NumberField } from '../ui/Field';
 import { Mark } from '../ui/Mark';
+import { Text } from '../ui/Text';
 import type { QuickForm } from './form';
 
 export interface FieldSay { error?: string; mends?: { label: string; onPress: () => void }[]; note?: string }
@@ -18,7 +19,9 @@ export type SayOf = (field: string) => FieldSay;
 /** What stands under a field: the server's sentence with its mends, or what it understood. */
 export function sayings(errors: readonly FieldError[], notes: readonly InputNote[], setField: (field: string, value: string) => void): SayOf {
   return (field) => {
-    const error = errors.find(({ pointer }) => pointer === `#/${field}` || pointer === `#/${field.replace('.', '/')}`);
+    const place = `#/${field.replace('.', '/')}`;
+    // a fault in one group (`#/groups/front/0`) is told where the groups stand
+    const error = errors.find(({ pointer }) => pointer === place || (field.startsWith('groups.') && pointer.startsWith(`${place}/`)));
     if (error) return { error: error.detail, mends: error.mends?.map((mend) => ({ label: mend.label, onPress: () => setField(mend.field, mend.value) })) };
     const said = notes.filter((note) => note.field === field && note.code !== 'default-error').map((note) => note.text);
     return said.length > 0 ? { note: said.join(' ') } : {};
@@ -38,9 +41,10 @@ export function ReadingCard({ form, set, say, askField }: { form: QuickForm; set
           </View>
           <View style={styles.se}>
             <NumberField look="small" label={quickText.error} spoken={quickText.errorSpoken} unit={quickText.hz} placeholder={quickText.defaultErrorValue}
-              value={form.se} onChange={(se) => set({ se })} maxLength={LIMITS.hzText} hint={form.se === '' ? quickText.defaultError : undefined} {...say('se')} />
+              value={form.se} onChange={(se) => set({ se })} maxLength={LIMITS.hzText} {...say('se')} />
           </View>
         </View>
+        {form.se === '' && <Text kind="caption" tone="muted">{quickText.defaultError}</Text>}
       </View>
       <Disclosure label={quickText.more} openLabel={unfolded ? quickText.more : quickText.fewer} heldOpen={unfolded}>
         <View style={[styles.body, styles.more]}>
@@ -53,7 +57,7 @@ export function ReadingCard({ form, set, say, askField }: { form: QuickForm; set
 }
 
 const styles = StyleSheet.create({
-  body: { padding: space.lg, paddingTop: space.md },
+  body: { padding: space.lg, paddingTop: space.md, gap: space.sm },
   pair: { flexDirection: 'row', flexWrap: 'wrap', gap: space.lg },
   j: { flexGrow: 1.35, flexShrink: 1, flexBasis: 150, minWidth: 0 },
   se: { flexGrow: 1, flexShrink: 1, flexBasis: 118, minWidth: 0 },

@@ -67,7 +67,7 @@ export function withField(form: QuickForm, field: string, value: string): QuickF
     }
     case 'groups.front': case 'groups.rear': case 'groups.left': case 'groups.right': {
       const side = field.slice('groups.'.length) as 'front' | 'rear' | 'left' | 'right';
-      return { ...form, [side]: pairFrom(value, form[side]) };
+      return { ...form, [side]: value.includes(SEPARATOR) ? pairFrom(value, form[side]) : withGroup(form[side], value) };
     }
     default:
       return form;
@@ -76,9 +76,11 @@ export function withField(form: QuickForm, field: string, value: string): QuickF
 
 const SEPARATOR = '~';
 const pairFrom = (text: string, otherwise: GroupPair): GroupPair => {
-  const parts = text.split(text.includes(SEPARATOR) ? SEPARATOR : ';').map((part) => part.trim());
+  const parts = text.split(SEPARATOR).map((part) => part.trim());
   return parts.length === 2 ? [parts[0]!, parts[1]!] : otherwise;
 };
+/** A single group goes to the place that is still empty. */
+const withGroup = (pair: GroupPair, group: GroupText): GroupPair => (pair[0] === '' ? [group, pair[1]] : [pair[0], group]);
 
 const TEXT_KEYS = { j: 'j', se: 'se', partner: 'partner', fieldMHz: 'mhz', relation: 'relation' } as const;
 

@@ -1,6 +1,6 @@
 import { QueryClientProvider } from '@tanstack/react-query';
 import { usePathname } from 'expo-router';
-import { useEffect, useRef, useState, type ReactNode } from 'react';
+import { Suspense, useEffect, useRef, useState, type ReactNode } from 'react';
 import { Pressable, StyleSheet, View } from 'react-native';
 
 import { uiText } from '@/shared/text/ui';
@@ -9,6 +9,7 @@ import { createQueryClient } from '../data/sessionEnd';
 import { useLayout } from '../theme/useLayout';
 import { color, radius, space } from '../theme/tokens';
 import { ScreenCorner } from '../ui/screenCorner';
+import { ScreenState } from '../ui/ScreenState';
 import { Text } from '../ui/Text';
 import { asElement, web } from '../ui/webProps';
 import { Corner, Rail, Tabs } from './Navigation';
@@ -42,7 +43,9 @@ function Frame({ children }: { children: ReactNode }) {
         {isWide && <Rail />}
         <View style={styles.column}>
           <View ref={main} role="main" id="main" style={styles.main} {...web({ tabIndex: -1 })}>
-            <ScreenCorner value={isWide ? null : <Corner />}>{children}</ScreenCorner>
+            <ScreenCorner value={isWide ? null : <Corner />}>
+              <Suspense fallback={<View style={styles.wait}><ScreenState kind="loading" title={uiText.loading} /></View>}>{children}</Suspense>
+            </ScreenCorner>
           </View>
           {!isWide && <Tabs />}
         </View>
@@ -65,6 +68,7 @@ const styles = StyleSheet.create({
   row: { flex: 1, flexDirection: 'row', minHeight: 0 },
   column: { flex: 1, minWidth: 0, minHeight: 0 },
   main: { flex: 1, minHeight: 0, minWidth: 0 },
+  wait: { padding: space.lg },
   skip: { position: 'absolute', top: space.sm, left: space.sm, zIndex: 50, backgroundColor: color.ink, borderRadius: radius.control, padding: space.md },
   away: { top: -200 },
 });

@@ -8,8 +8,6 @@ export const relationText = {
   noFormula: 'A table of measured values by class, not an equation.',
   curve: 'Curve',
   curveGroups: (front: string, rear: string) => `Drawn for front ${front}; rear ${rear}.`,
-  curveLabel: (low: string, high: string) => `Curve of J against the dihedral angle; it reaches from ${low} to ${high} hertz`,
-  noCurve: 'No curve with these groups: the relation does not speak about them.',
   spread: (spread: string) => `spread ${spread}`,
   parameters: 'Parameters',
   parameterColumns: { set: 'Set', name: 'Parameter', value: 'Value', origin: 'Origin' },

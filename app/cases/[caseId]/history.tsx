@@ -1,6 +1,6 @@
 import { useLocalSearchParams } from 'expo-router';
 
-import { HistoryScreen } from '@/components/cases/HistoryScreen';
+import { HistoryScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   const { caseId } = useLocalSearchParams<{ caseId: string }>();

@@ -1,6 +1,6 @@
 import { useLocalSearchParams } from 'expo-router';
 
-import { CaseScreen } from '@/components/cases/CaseScreen';
+import { CaseScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   const { caseId } = useLocalSearchParams<{ caseId: string }>();

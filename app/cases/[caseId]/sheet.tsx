@@ -1,6 +1,6 @@
 import { useLocalSearchParams } from 'expo-router';
 
-import { SheetScreen } from '@/components/cases/SheetScreen';
+import { SheetScreen } from '@/components/screens/lazyScreens';
 
 export default function Route() {
   const { caseId } = useLocalSearchParams<{ caseId: string }>();

@@ -1,0 +1,15 @@
+export { CasesScreen } from '../cases/CasesScreen';
+export { NewCaseScreen } from '../cases/NewCaseScreen';
+export { CaseScreen } from '../cases/CaseScreen';
+export { HistoryScreen } from '../cases/HistoryScreen';
+export { SheetScreen } from '../cases/SheetScreen';
+export { ReviewsScreen } from '../reviews/ReviewsScreen';
+export { TeamScreen } from '../team/TeamScreen';
+export { ProjectScreen } from '../team/ProjectScreen';
+export { AccountScreen } from '../account/AccountScreen';
+export { SignInScreen } from '../auth/SignInScreen';
+export { ForgotScreen } from '../auth/ForgotScreen';
+export { ResetScreen } from '../auth/ResetScreen';
+export { InvitationScreen } from '../auth/InvitationScreen';
+export { AdminScreen } from '../admin/AdminScreen';
+export { MailboxScreen } from '../mailbox/MailboxScreen';
