@@ -17,7 +17,7 @@ export interface RunningServer {
 
 /** The checkout that the wrapper script started us from. */
 export const projectRoot = (): string => {
-  const root: string | undefined = process.env.PROJECT_ROOT;
+  const root = (process.env as Record<string, string | undefined>).PROJECT_ROOT;
   if (root === undefined || root === '') throw new Refusal('PROJECT_ROOT is missing: run this through npm run check, score or bench.');
   return root;
 };
