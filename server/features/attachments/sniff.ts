@@ -1,4 +1,4 @@
-import { fileTypeFromBuffer } from 'file-type';
+import { fileTypeFromBuffer } from 'file-type/core';
 
 import { casesText } from '@/shared/text/cases';
 
