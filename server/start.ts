@@ -37,6 +37,15 @@ export function makeDeps(env: Env, log: Log, passwords: Passwords, now: () => Da
   };
 }
 
+/** Lets go of everything `makeDeps` opened; mail under way gets a moment. */
+export async function stopDeps({ sessions, mail, passwords, db, log }: Deps): Promise<void> {
+  sessions.stop();
+  await Promise.race([mail.settled(), new Promise((resolve) => setTimeout(resolve, 300).unref())]);
+  await passwords.close();
+  await db.close();
+  log.flush();
+}
+
 /** @throws SettingError in one sentence when the schema is older than this server */
 export async function checkSchema(deps: Deps): Promise<void> {
   const missing = await missingMigrations(deps.db);
@@ -79,11 +88,7 @@ export async function serve(env: Env, log: Log, passwords: Passwords): Promise<R
       const cut = setTimeout(() => server.closeAllConnections(), 500);
       await closed;
       clearTimeout(cut);
-      deps.sessions.stop();
-      await Promise.race([deps.mail.settled(), new Promise((resolve) => setTimeout(resolve, 300).unref())]);
-      await passwords.close();
-      await deps.db.close();
-      log.flush();
+      await stopDeps(deps);
     },
   };
 }

@@ -35,7 +35,7 @@ export const fieldWords: z.core.$ZodErrorMap = (issue) => {
     case 'invalid_format':
       return FORMATS[issue.format] ?? fieldText.form;
     case 'invalid_union':
-      return issue.input === undefined ? fieldText.missing : fieldText.form;
+      return issue.input === undefined ? fieldText.missing : fieldText.kind;
     default:
       return fieldText.form;
   }

@@ -84,5 +84,6 @@ export const fieldText = {
   email: 'Write the address as name@place.example.',
   id: 'This is not an id of this server.',
   form: 'This is not in the form that is read here.',
+  kind: 'This is none of the kinds that are read here; /api/docs lists them.',
   unknown: (field: string) => `There is no field "${field}" here; leave it out.`,
 } as const;
