@@ -89,17 +89,26 @@ function crossing(f: Periodic, y: number, p: { x0: number; x1: number; y0: numbe
 
 /**
  * Every angle (radians, one turn of the circle) with f = y; [] when there is none or f is constant.
- * A turn that meets y within rounding is one root (the tangent case).
+ * A turn that meets y exactly, or misses it by no more than rounding, is one root (the tangent case).
  */
 export function anglesAt(f: Periodic, y: number): number[] {
   const [low, high] = reachOf(f);
-  const rounding = 32 * Number.EPSILON * (Math.abs(low) + Math.abs(high) + Math.abs(y));
+  const rounding = 16 * Number.EPSILON * Math.max(Math.abs(low), Math.abs(high), Math.abs(y));
   const found: number[] = [];
-  for (const p of pieces(f)) {
-    if (Math.abs(p.y0 - y) <= rounding) found.push(p.x0);
-    else if (Math.abs(p.y1 - y) > rounding && p.y0 < y !== p.y1 < y) found.push(crossing(f, y, p));
-  }
-  return found;
+  const count = f.turns.length;
+  pieces(f).forEach((p, i) => {
+    const before = f.peaks[(i + count - 1) % count] ?? p.y0;
+    const miss = p.y0 - y;
+    // all on one side: no crossing here, only a touch
+    const touches = Math.abs(miss) <= rounding && miss > 0 === before > y && miss > 0 === p.y1 > y;
+    if (miss === 0 || touches) found.push(p.x0);
+    if (miss !== 0 && p.y1 !== y && p.y0 < y !== p.y1 < y) found.push(crossing(f, y, p));
+  });
+  // two roots at one turn, closer than doubles can tell their J apart, are the tangent case again
+  return found.filter((x, i) => {
+    const next = i + 1 < found.length ? found[i + 1] : (found[0] ?? 0) + 2 * Math.PI;
+    return found.length === 1 || (next ?? 0) - x > 1e-7;
+  });
 }
 
 /**

@@ -11,7 +11,7 @@ import { ENGINE_VERSION } from '../version';
 import { calculate } from './calculate';
 import { computeAnswer, judgeCandidate } from './judgeCandidates';
 
-const label = (r: Reading): string => say.readingLabel(r.atomA, r.atomB);
+const label = (r: Reading): string => say.readingLabel(r.atomA, r.atomB, r.j);
 
 /** Cautions that a reading raises by what is typed beside its numbers. */
 function readingCautions(r: Reading): (CautionId | false)[] {

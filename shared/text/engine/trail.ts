@@ -6,7 +6,8 @@ const names = (list: readonly string[]): string => (list.length < 2 ? (list[0] ?
 /** Sentences about a whole case. */
 export const trailText = {
   names,
-  readingLabel: (atomA: string, atomB: string) => (atomA && atomB ? `${atomA}–${atomB}` : atomA || atomB || 'Reading'),
+  /** `H2–H3`; a reading without atoms is named by its number */
+  readingLabel: (atomA: string, atomB: string, j = '') => (atomA && atomB ? `${atomA}–${atomB}` : atomA || atomB || `Reading ${j.trim()}`.trim()),
   missingReading: () => 'The calculation names a reading that is not in the case: choose another reading.',
   wrongPath: (path: string, nuclei: string) => `This reading is ${path}(${nuclei || 'not told'}): the relations held read ³_J_(H,H) only.`,
   notRead: (typed: string) => `${typed || 'nothing'} as typed`,
@@ -43,7 +44,7 @@ export const trailText = {
     decidedDetail: (list: readonly string[], by: readonly string[]) => `${names(list)} ${list.length === 1 ? 'is' : 'are'} excluded by ${names(by)}. None of these stays possible.`,
     conflict: () => 'None of these fits',
     conflictDetail: () => 'Every candidate is excluded: check the readings, the relations’ domains and the list of candidates.',
-    several: (list: readonly string[]) => `${names(list)} fit alike`,
+    several: (list: readonly string[]) => (list.length === 2 ? `Both remain: ${list[0] ?? ''}, and ${list[1] ?? ''}` : `${list.length} candidates remain`),
     severalDetail: (what: string | null) => (what === null ? 'The readings do not part them.' : `What would part them: ${what}.`),
   },
   person: { title: 'Answer', grade: 'grade', candidate: 'candidate', none: 'none of these', open: 'left open', reasons: 'reasons', override: 'differs from the computed answer, because' },
