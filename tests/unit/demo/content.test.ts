@@ -3,11 +3,11 @@ import { demoFile } from '@/server/db/demo/files';
 import { storyClock } from '@/server/db/demo/moments';
 import { DEMO_PASSWORD, PEOPLE, PROJECTS } from '@/server/db/demo/people';
 import { at, DEMO_FILE_KEYS, PERSON_KEYS, PROJECT_KEYS } from '@/server/db/demo/story';
-import { relationRegistry } from '@/server/relations/registry';
 import { quickLook } from '@/shared/engine';
 import { LIMITS } from '@/shared/limits';
+import { heldForTests } from '../../helpers/registry';
 
-const registry = relationRegistry();
+const registry = heldForTests();
 const num = (typed: string): number => Number(typed.replace(',', '.').replace(/^(ca\.|<)\s*/, ''));
 const PLANTED = 'partner-differs';
 

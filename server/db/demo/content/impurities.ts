@@ -18,7 +18,7 @@ export const impurities: DemoCase[] = [
       calculations: [doubleBond('c1', 'r1', { left: [G.ethylChain, G.h], right: [G.ethylChain, G.h] })],
       candidates: eAndZ(),
       evidence: [evidence('e1', 'synthesis', 'for', 'z', 'The alcohol of this batch was leaf alcohol, (Z)-hex-3-en-1-ol.')],
-      answer: answer('assigned', 'z', 'Z.', '10.8 Hz between two carbon groups is inside the cis class and far from trans.'),
+      answer: answer('assigned', 'z', 'Z, as in leaf alcohol.', '10.8 Hz between two carbon groups is inside the cis class and far from trans.'),
       tags: ['HPLC', 'ester'],
     }),
     acts: [
@@ -38,7 +38,7 @@ export const impurities: DemoCase[] = [
       readings: [reading('r1', ['H-2', 'H-3'], '16.0', { partner: '16.0', where: '6.49 ppm and 7.58 ppm' })],
       calculations: [doubleBond('c1', 'r1', { left: [G.aryl, G.h], right: [G.ester, G.h] })],
       candidates: eAndZ(),
-      answer: answer('assigned', 'e', 'E.', '16.0 Hz at both protons is trans for two carbon groups.'),
+      answer: answer('assigned', 'e', 'E, trans across C-2 and C-3.', '16.0 Hz at both protons is trans for two carbon groups.'),
       tags: ['acid'],
     }),
     acts: [
@@ -57,7 +57,7 @@ export const impurities: DemoCase[] = [
       readings: [reading('r1', ['H-2', 'H-3'], '15.5', { partner: '15.6', where: '5.82 ppm and 7.09 ppm' })],
       calculations: [doubleBond('c1', 'r1', { left: [G.ester, G.h], right: [G.ethylChain, G.h] })],
       candidates: eAndZ(),
-      answer: answer('assigned', 'e', 'E.', '15.5 Hz is trans for two carbon groups.'),
+      answer: answer('assigned', 'e', 'E, trans across C-2 and C-3.', '15.5 Hz is trans for two carbon groups.'),
       tags: ['ester'],
     }),
     acts: [
@@ -78,7 +78,7 @@ export const impurities: DemoCase[] = [
       calculations: [doubleBond('c1', 'r1', { left: [G.ketone, G.h], right: ['C(C,C,C)', G.h] }, 5), doubleBond('c2', 'r1', { left: [G.ketone, G.h], right: ['C(C,C,C)', G.h] }, 6)],
       candidates: [candidate('five', 'cyclopent-2-enone', []), candidate('six', 'cyclohex-2-enone', [])],
       evidence: [evidence('e1', 'other', 'for', 'five', 'GC and MS: M⁺ 110, as for the dimethylcyclopentenone.')],
-      answer: answer('not-decided', null, 'Not decided by the coupling.', 'The bond is cis in either ring, so there is no E or Z to ask for. 5.7 Hz is the range of a five-membered ring; ring size is not something this calculation scores.',
+      answer: answer('not-decided', null, 'The coupling does not tell the ring size.', 'The bond is cis in either ring, so there is no E or Z to ask for. 5.7 Hz is the range of a five-membered ring; ring size is not something this calculation scores.',
         { leftOpen: 'Carbonyl shift in the 13C spectrum, or an authentic sample.' }),
       tags: ['ring', 'ketone'],
     }),
@@ -113,7 +113,7 @@ export const impurities: DemoCase[] = [
       readings: [reading('r1', ['H-2', 'H-3'], '12.1', { partner: '12.0', where: '5.51 ppm and 7.28 ppm' })],
       calculations: [doubleBond('c1', 'r1', { left: [G.nitrile, G.h], right: [G.aryl, G.h] })],
       candidates: eAndZ(),
-      answer: answer('not-decided', null, 'Not decided.', '12.1 Hz is in the open band for two carbon groups.', { leftOpen: 'The other isomer, or an NOE.' }),
+      answer: answer('not-decided', null, '12.1 Hz lies between cis and trans.', '12.1 Hz is in the open band for two carbon groups.', { leftOpen: 'The other isomer, or an NOE.' }),
       tags: ['nitrile'],
     }),
     acts: [
@@ -143,7 +143,7 @@ export const impurities: DemoCase[] = [
       ],
       calculations: [singleBond('c1', 'r1', { front: [G.ethylChain, G.hydroxy], rear: ['Cl', G.ethylChain] }, 'ring', 'vicinal-hh/karplus-1963')],
       candidates: [candidate('trans', 'trans', [angle('c1', 150, 210)], 'Both groups equatorial.'), candidate('cis', 'cis', [angle('c1', 40, 75)], 'One group axial.')],
-      answer: answer('tentative', 'trans', 'trans.', '9.3 Hz needs two axial hydrogens.',
+      answer: answer('tentative', 'trans', 'trans, both groups equatorial.', '9.3 Hz needs two axial hydrogens.',
         { overrideReason: 'The calculation leaves most angles open; 11.1 Hz from H-1 to H-6ax shows beside it that H-1 is axial.' }),
       tags: ['ring', 'halide'],
     }),

@@ -43,7 +43,7 @@ export const vinylSigned: DemoCase[] = [
       calculations: [doubleBond('c1', 'r1', { left: [G.aryl, G.h], right: [G.amide, G.h] })],
       candidates: eAndZ(),
       evidence: [evidence('e1', 'synthesis', 'for', 'z', 'Formed from the E isomer by light; the starting material shows 15.7 Hz.')],
-      answer: answer('not-decided', null, 'Not decided by this coupling alone.', '12.6 Hz lies between cis and trans for two carbon groups. The pair with VN-011 speaks for Z, but the pair is not scored here.',
+      answer: answer('not-decided', null, '12.6 Hz lies between cis and trans.', '12.6 Hz lies between cis and trans for two carbon groups. The pair with VN-011 speaks for Z, but the pair is not scored here.',
         { leftOpen: 'An NOE between H-2 and H-3 on this sample would decide. Booked on the 600.' }),
       tags: ['amide', 'photochemistry'],
     }),
@@ -72,7 +72,7 @@ export const vinylSigned: DemoCase[] = [
       ],
       calculations: [doubleBond('c1', 'r1', { left: [G.methyl, G.h], right: [G.amide, G.h] })],
       candidates: eAndZ(),
-      answer: answer('assigned', 'e', 'E.', '15.2 Hz, read at both protons, is inside the trans class for two carbon groups.'),
+      answer: answer('assigned', 'e', 'E, trans across C-2 and C-3.', '15.2 Hz, read at both protons, is inside the trans class for two carbon groups.'),
       tags: ['amide'],
     }),
     acts: [
@@ -91,7 +91,7 @@ export const vinylSigned: DemoCase[] = [
       readings: [reading('r1', ['H-3', 'H-4'], 'ca. 16', { se: '', where: '6.77 ppm, crude spectrum', note: 'H-4 under the aromatic signals.' })],
       calculations: [doubleBond('c1', 'r1', { left: [G.ketone, G.h], right: [G.aryl, G.h] })],
       candidates: eAndZ(),
-      answer: answer('tentative', 'e', 'E.', 'About 16 Hz is trans for two carbon groups, but the error of 1 Hz reaches towards the open band.', { leftOpen: 'Read on the crude; to be repeated on the pure product.' }),
+      answer: answer('tentative', 'e', 'E, as far as the crude tells.', 'About 16 Hz is trans for two carbon groups, but the error of 1 Hz reaches towards the open band.', { leftOpen: 'Read on the crude; to be repeated on the pure product.' }),
       tags: ['ketone', 'crude'],
     }),
     acts: [
@@ -111,7 +111,7 @@ export const vinylSigned: DemoCase[] = [
       readings: [reading('r1', ['H-3', 'H-4'], '16.32', { se: '0.05', partner: '16.30', where: '6.79 ppm and 7.51 ppm' })],
       calculations: [doubleBond('c1', 'r1', { left: [G.ketone, G.h], right: [G.aryl, G.h] })],
       candidates: eAndZ(),
-      answer: answer('assigned', 'e', 'E.', '16.3 Hz at both protons, on the pure product, replaces the crude reading.'),
+      answer: answer('assigned', 'e', 'E, trans across C-3 and C-4.', '16.3 Hz at both protons, on the pure product, replaces the crude reading.'),
       tags: ['ketone'],
     }),
     acts: [
