@@ -1,5 +1,5 @@
 import { spawn } from 'node:child_process';
-import { chmodSync, chownSync, closeSync, existsSync, mkdirSync, mkdtempSync, openSync, readFileSync, readdirSync, renameSync, rmSync, writeFileSync } from 'node:fs';
+import { chmodSync, chownSync, closeSync, existsSync, mkdirSync, mkdtempSync, openSync, readFileSync, readdirSync, renameSync, rmSync, symlinkSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 import { databaseAccount, hasDatabase } from './dataDir.mjs';
 import { findProgram } from './debian.mjs';
@@ -70,14 +70,20 @@ function program(name) {
   return file;
 }
 
-/** Makes an empty database beside its final place and moves it there when whole, so a broken-off try leaves nothing. */
-async function createDatabase(dataDir, account) {
+/**
+ * Makes an empty database beside its final place and moves it there when whole, so a broken-off try leaves nothing.
+ * mariadb-install-db, a shell script, trips over blanks in a path; it is given a short link to the folder instead.
+ */
+async function createDatabase(dataDir, account, runDir) {
   const half = path.join(dataDir, 'mariadb.new');
+  const link = path.join(runDir, 'new');
   rmSync(half, { recursive: true, force: true });
   mkdirSync(half, { recursive: true, mode: 0o700 });
   if (account) chownSync(half, account.uid, account.gid);
-  await mustRun('Making the database', program('mariadb-install-db'), ['--no-defaults', `--datadir=${half}`, ...(account ? [`--user=${account.name}`] : []),
-    '--auth-root-authentication-method=normal', '--skip-test-db', '--skip-name-resolve'], { cwd: '/' });
+  symlinkSync(half, link);
+  await mustRun('Making the database', program('mariadb-install-db'), ['--no-defaults', `--datadir=${link}`,
+    '--auth-root-authentication-method=normal', '--skip-test-db', '--skip-name-resolve'], { cwd: '/', account });
+  rmSync(link);
   renameSync(half, path.join(dataDir, 'mariadb'));
 }
 
@@ -184,8 +190,6 @@ async function start(dataDir, { lock, fast, schemas, account }) {
     say(`Stopping the database server that an earlier start left behind (process ${pid}).`);
     await stopProcess(pid, 60_000);
   }
-  const fresh = !hasDatabase(dataDir);
-  if (fresh) await createDatabase(dataDir, account);
   const runDir = makeRunDir(dataDir, account);
   const port = await freePort();
   const init = initSql({ rootPassword: secretOf(dataDir, 'database-root'), ownerPassword: secretOf(dataDir, 'database-owner'), appPassword: secretOf(dataDir, 'database-app'), schemas });
@@ -211,7 +215,9 @@ async function start(dataDir, { lock, fast, schemas, account }) {
       say(`The database could not be started again: ${error.message}`);
     }
   }
+  const fresh = !hasDatabase(dataDir);
   try {
+    if (fresh) await createDatabase(dataDir, account, runDir);
     await boot();
   } catch (error) {
     rmSync(runDir, { recursive: true, force: true });

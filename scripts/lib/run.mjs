@@ -11,13 +11,13 @@ export function tail(text, lines = 25) {
  * Runs a command to its end and returns what it wrote.
  * @param {string} command
  * @param {string[]} args
- * @param {{ cwd?: string, env?: NodeJS.ProcessEnv, stdio?: 'collect' | 'show' }} [options]
- *   `show` passes the output on to the terminal (stdout as it is) in place of collecting it
+ * @param {{ cwd?: string, env?: NodeJS.ProcessEnv, stdio?: 'collect' | 'show', account?: { uid: number, gid: number } | null }} [options]
+ *   `show` passes the output on to the terminal (stdout as it is) in place of collecting it; `account` runs it as another user
  * @returns {Promise<{ code: number, output: string }>}
  */
-export function run(command, args, { cwd = root, env = process.env, stdio = 'collect' } = {}) {
+export function run(command, args, { cwd = root, env = process.env, stdio = 'collect', account = null } = {}) {
   return new Promise((resolve, reject) => {
-    const child = spawn(command, args, { cwd, env, stdio: stdio === 'show' ? 'inherit' : ['ignore', 'pipe', 'pipe'] });
+    const child = spawn(command, args, { cwd, env, stdio: stdio === 'show' ? 'inherit' : ['ignore', 'pipe', 'pipe'], ...(account ? { uid: account.uid, gid: account.gid } : {}) });
     let output = '';
     const add = (chunk) => {
       output += chunk;
