@@ -18,5 +18,5 @@ export function AnswerPlots({ answer, groups, onPickGroup }: AnswerPlotsProps) {
   if (answer.single && answer.relation) {
     return <SingleBondPlots finding={answer.single} relation={answer.relation} reading={answer.reading} groups={groups} onPickGroup={onPickGroup} />;
   }
-  return answer.double && answer.double.ladder.length > 0 ? <DoubleBondPlots finding={answer.double} reading={answer.reading} /> : null;
+  return answer.double && answer.double.ladder.length > 0 ? <DoubleBondPlots finding={answer.double} reading={answer.reading} decided={answer.grade !== 'not-decided'} /> : null;
 }

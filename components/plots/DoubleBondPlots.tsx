@@ -3,7 +3,7 @@ import { StyleSheet, View } from 'react-native';
 import { fixed, hz, hzRange, inHundred } from '@/shared/format/number';
 import { PROVENANCE_WORDS } from '@/shared/format/words';
 import { quickText } from '@/shared/text/quick';
-import type { DoubleBondFinding } from '@/shared/types/answer';
+import type { DoubleBondFinding, LadderRow } from '@/shared/types/answer';
 import type { HzReading } from '@/shared/types/reading';
 
 import { space } from '../theme/tokens';
@@ -15,7 +15,11 @@ import { Ladder } from './Ladder';
 import { useWidth } from './useWidth';
 
 /** The ladder of a double bond; for a bond without a vicinal H,H pair the ladder is that of ³J(C,H) and bears no reading. */
-export function DoubleBondPlots({ finding, reading }: { finding: DoubleBondFinding; reading: HzReading }) {
+export function DoubleBondPlots({ finding, reading, decided }: {
+  finding: DoubleBondFinding; reading: HzReading;
+  /** odds stand only beside an answer that they decide: next to "not decided" they would speak against it */
+  decided: boolean;
+}) {
   const [width, onLayout] = useWidth();
   const isCarbon = finding.setting === 'trisubstituted' || finding.setting === 'tetrasubstituted';
   const shown = isCarbon ? null : reading;
@@ -41,7 +45,7 @@ export function DoubleBondPlots({ finding, reading }: { finding: DoubleBondFindi
             { key: 'geometry', head: say.geometry, rowHeader: true, cell: (row) => quickText.geometry[row.geometry] },
             { key: 'full', head: say.full, cell: (row) => range(row.fullHz) },
             { key: 'class', head: say.inClass, cell: (row) => (row.classHz ? range(row.classHz) : '–') },
-            { key: 'odds', head: say.likelihood, cell: (row) => { const weight = weights.get(row.geometry); return weight === undefined ? '–' : inHundred(weight); } },
+            ...(decided && weights.size > 1 ? [{ key: 'odds', head: say.likelihood, cell: (row: LadderRow) => { const weight = weights.get(row.geometry); return weight === undefined ? '–' : inHundred(weight); } }] : []),
           ]} />
           {compounds.length > 0 && (
             <Table caption={quickText.ladderTable} rows={compounds} rowKey={(row, at) => `${row.name}${at}`} columns={[

@@ -27,8 +27,8 @@ export function Ladder({ width, rows, reading, label }: { width: number; rows: r
           <G key={row.geometry}>
             <Rect x={row.full.x} y={row.y} width={row.full.width} height={plot.barHeight} rx={2} fill={color.calculated} fillOpacity={0.2} />
             {row.inClass && <Rect x={row.inClass.x} y={row.y} width={Math.max(3, row.inClass.width)} height={plot.barHeight} rx={1} fill={color.calculated} />}
-            {row.ticks.map((tick) => (
-              <Line key={`${tick.name}${tick.jHz}`} x1={tick.x} y1={row.y + plot.barHeight + 3} x2={tick.x} y2={row.y + plot.barHeight + 9} stroke={color.calculated} strokeWidth={1.5} />
+            {row.ticks.map((tick, at) => (
+              <Line key={at} x1={tick.x} y1={row.y + plot.barHeight + 3} x2={tick.x} y2={row.y + plot.barHeight + 9} stroke={color.calculated} strokeWidth={1.5} />
             ))}
             <SvgText x={0} y={row.y + plot.barHeight / 2 + 5} fontFamily={families.sans} fontSize={15} fontWeight="600" fill={color.ink}>{quickText.geometry[row.geometry]}</SvgText>
           </G>

@@ -1,8 +1,10 @@
-import { Component, lazy, Suspense, type ReactNode } from 'react';
+import { useQueryClient } from '@tanstack/react-query';
+import { Component, lazy, Suspense, useEffect, type ReactNode } from 'react';
 
 import { quickText } from '@/shared/text/quick';
 import { uiText } from '@/shared/text/ui';
 
+import { relationsOptions } from '../data/relations';
 import { Button } from '../ui/Button';
 import { Notice } from '../ui/Notice';
 import type { AnswerPlotsProps } from './AnswerPlots';
@@ -17,8 +19,15 @@ const load = () => import('./entry');
 const Plots = lazy(async () => ({ default: (await load()).AnswerPlots }));
 const OneCurve = lazy(async () => ({ default: (await load()).RelationCurve }));
 
-/** Fetches the drawings before they are needed. */
-export const preloadPlots = () => void load().catch(() => undefined); // asked again, and told, when they are needed
+/** Fetches drawings and relations side by side, once the first answer is there: never before it, and not one after the other. */
+export function usePlotsAhead(wanted: boolean): void {
+  const client = useQueryClient();
+  useEffect(() => {
+    if (!wanted) return;
+    void load().catch(() => undefined); // asked again, and told, by the drawing itself
+    void client.prefetchQuery(relationsOptions);
+  }, [wanted, client]);
+}
 
 export function LazyAnswerPlots(props: AnswerPlotsProps) {
   return (

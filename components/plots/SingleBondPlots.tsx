@@ -88,11 +88,11 @@ function DialPart({ finding, groups, onPickGroup, turn }: Pick<Props, 'finding' 
 function CurvePart({ finding, relation, reading, curve, turn }: Pick<Props, 'finding' | 'relation' | 'reading'> & { curve: DeviceCurve; turn: Turn }) {
   const [width, onLayout] = useWidth();
   const { isWide } = useLayout();
-  const height = isWide ? 280 : 236;
+  const height = isWide ? 280 : PLOT_HEIGHT.curve;
   const notes = [finding.arcs.length > 0 ? quickText.curveNote : quickText.curveNoteBand, curve.even ? quickText.curveNoteEven : quickText.curveNoteUneven];
   return (
     <View style={styles.curve}>
-      <View onLayout={onLayout} style={{ minHeight: Math.min(height, PLOT_HEIGHT.curve) }}>
+      <View onLayout={onLayout} style={{ minHeight: height }}>
         {width > 0 && (
           <Curve width={width} height={height} points={curve.points} spreadHz={relation.spreadHz} reading={reading} roots={finding.roots} arcs={finding.arcs}
             shown={{ phiDeg: turn.phiDeg, jHz: turn.jHz }} label={quickText.curveLabel(rootsWords(finding.roots), arcsWords(finding.arcs))} />

@@ -31,14 +31,14 @@ export function AnswerPart({ asked, answer, problem, waiting, setField, onRetry,
 
 function spokenOf(asked: boolean, answer: QuickLookResponse | undefined, problem: ApiProblem | null): string {
   if (!asked) return '';
-  if (problem) return problem.errors[0]?.detail ?? problem.detail;
+  if (problem) return problem.is('invalid-input') ? '' : problem.detail; // a field tells its own fault
   if (!answer) return '';
   return answer.state === 'question' ? plainText(answer.question) : quickText.spoken(GRADE_WORDS[answer.grade], plainText(answer.headline));
 }
 
 function Strip({ asked, answer, problem, waiting, setField, onRetry, onCopyText, onGroups }: Parameters<typeof AnswerPart>[0]) {
   if (!asked) return <AnswerAsks headline={quickText.begin} detail={quickText.beginDetail} />;
-  if (problem?.is('invalid-input')) return <AnswerAsks tone="refusal" headline={quickText.refused} detail={problem.errors[0]?.detail ?? problem.detail} />;
+  if (problem?.is('invalid-input')) return <AnswerAsks tone="refusal" headline={quickText.refused} detail={quickText.refusedDetail(problem.errors.length)} />;
   if (problem) {
     return (
       <AnswerAsks tone="refusal" headline={problem.body.title} detail={problem.detail}>
@@ -60,7 +60,7 @@ function Strip({ asked, answer, problem, waiting, setField, onRetry, onCopyText,
   const odds = answer.double?.likelihoods ?? [];
   return (
     <AnswerStrip grade={answer.grade} headline={answer.headline} detail={answer.detail} stale={waiting ? quickText.staleAnswer : undefined}>
-      {odds.length > 1 && (
+      {odds.length > 1 && answer.grade !== 'not-decided' && (
         <Text kind="small" tone="muted">{odds.map((entry) => quickText.odds(inHundred(entry.weight), quickText.geometry[entry.geometry])).join(' · ')}</Text>
       )}
       {onCopyText && <View style={styles.buttons}><Button small label={quickText.copyText} onPress={onCopyText} /></View>}

@@ -4,7 +4,7 @@ import { StyleSheet, View } from 'react-native';
 import { quickText } from '@/shared/text/quick';
 
 import { useQuickLook } from '../data/quickLook';
-import { LazyAnswerPlots } from '../plots/LazyPlots';
+import { LazyAnswerPlots, usePlotsAhead } from '../plots/LazyPlots';
 import { size } from '../theme/tokens';
 import { useLayout } from '../theme/useLayout';
 import { Button } from '../ui/Button';
@@ -31,7 +31,9 @@ export function QuickLookScreen() {
   const { copy, copied, part: copyPart } = useCopy();
   const { isWide } = useLayout();
   const answered = answer?.state === 'answered' && answer.bond === form.bond ? answer : null;
-  const plotted = useDeferredValue(answered);
+  // later answers do not wait for their drawings; the first shows the box that keeps the drawings' place
+  const plotted = useDeferredValue(answered) ?? answered;
+  usePlotsAhead(answered !== null);
   const say = useMemo(() => sayings(problem?.errors ?? [], waiting ? [] : answer?.notes ?? [], setField), [problem, answer, waiting, setField]);
   const groups = isWhole(form.front, form.rear) ? { front: form.front, rear: form.rear } : null;
   const asked = request !== null;

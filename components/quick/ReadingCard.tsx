@@ -10,6 +10,7 @@ import { Card } from '../ui/Card';
 import { Disclosure } from '../ui/Disclosure';
 import { Field, NumberField } from '../ui/Field';
 import { Mark } from '../ui/Mark';
+import { RichText } from '../ui/RichText';
 import { Text } from '../ui/Text';
 import type { QuickForm } from './form';
 
@@ -28,22 +29,29 @@ export function sayings(errors: readonly FieldError[], notes: readonly InputNote
   };
 }
 
+/** What was understood stands under both fields over the card's width, so that no field changes its width for it. */
+const faultOf = ({ error, mends }: FieldSay): FieldSay => ({ error, mends });
+
 /** The measured J, its ±, and what is asked only now and then: the partner's splitting and the field. */
 export function ReadingCard({ form, set, say, askField }: { form: QuickForm; set: (change: Partial<QuickForm>) => void; say: SayOf; askField: boolean }) {
   const unfolded = askField || form.partner !== '' || form.fieldMHz !== '' || say('partner').error !== undefined || say('fieldMHz').error !== undefined;
+  // a sentence under a field needs the card's width, and so does a long number
+  const wide = (field: 'j' | 'se') => say(field).error !== undefined || form[field].length > 6;
+  const notes = [say('j').note, say('se').note].filter((note) => note !== undefined);
   return (
     <Card flush>
       <View style={styles.body}>
         <View style={styles.pair}>
-          <View style={styles.j}>
+          <View style={[styles.j, wide('j') && styles.alone]}>
             <NumberField label={quickText.measured} labelTone="measured" mark={<Mark ink="measured" size={13} />} spoken={quickText.measuredSpoken} unit={quickText.hz}
-              value={form.j} onChange={(j) => set({ j })} maxLength={LIMITS.hzText} autoFocus={form.j === ''} enterKeyHint="done" {...say('j')} />
+              value={form.j} onChange={(j) => set({ j })} maxLength={LIMITS.hzText} autoFocus={form.j === ''} enterKeyHint="done" {...faultOf(say('j'))} />
           </View>
-          <View style={styles.se}>
+          <View style={[styles.se, wide('se') && styles.alone]}>
             <NumberField look="small" label={quickText.error} spoken={quickText.errorSpoken} unit={quickText.hz} placeholder={quickText.defaultErrorValue}
-              value={form.se} onChange={(se) => set({ se })} maxLength={LIMITS.hzText} {...say('se')} />
+              value={form.se} onChange={(se) => set({ se })} maxLength={LIMITS.hzText} {...faultOf(say('se'))} />
           </View>
         </View>
+        {notes.length > 0 && <RichText kind="small" text={notes.join(' ')} />}
         {form.se === '' && <Text kind="caption" tone="muted">{quickText.defaultError}</Text>}
       </View>
       <Disclosure label={quickText.more} openLabel={unfolded ? quickText.more : quickText.fewer} heldOpen={unfolded}>
@@ -61,5 +69,6 @@ const styles = StyleSheet.create({
   pair: { flexDirection: 'row', flexWrap: 'wrap', gap: space.lg },
   j: { flexGrow: 1.35, flexShrink: 1, flexBasis: 150, minWidth: 0 },
   se: { flexGrow: 1, flexShrink: 1, flexBasis: 118, minWidth: 0 },
+  alone: { flexBasis: '100%' },
   more: { gap: space.lg, paddingTop: space.sm },
 });

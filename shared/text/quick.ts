@@ -68,7 +68,7 @@ export const quickText = {
   begin: 'Type a ³_J_ to begin',
   beginDetail: `Size only: a plain spectrum does not show the sign. 9.6, 9,6 and 9.6${NBSP}Hz are all read.`,
   refused: 'This value cannot be used as it is',
-  refusedDetail: 'See the sentence under the field.',
+  refusedDetail: (fields: number) => (fields > 1 ? `${fields} fields above say what to do. Nothing typed is lost.` : 'The field above says what to do. Nothing typed is lost.'),
   working: 'Asking the server',
   staleAnswer: 'This is the answer to the entry before.',
   copyLink: 'Copy link',

@@ -28,7 +28,7 @@ export const uiText = {
   offline: (time: string) => `**No connection since ${time}.** What you type stays on this device. Answers need the server.`,
   backOnline: 'The server is back.',
   signedOut: '**You are signed out.** What you typed is kept on this device. Sign in to go on.',
-  demo: '**Demonstration.** This installation holds invented cases and demo accounts. Keep no real work in it.',
+  demo: '**Demo.** Invented cases and accounts: keep no real work here.',
   demoMailbox: 'Mailbox',
   hideStrip: 'Hide this notice',
   olderPage: 'This page is older than the server: reload it.',
