@@ -98,7 +98,7 @@ function drawLadder(writer: SheetWriter, plot: DoublePlot, x: number, y: number,
   return g.height;
 }
 
-export const ANGLE_HEIGHT = 148;
+export const ANGLE_HEIGHT = 132;
 
 /** Draws a plot with its description for readers that cannot see it. */
 export function drawPlot(writer: SheetWriter, plot: NonNullable<SheetCalculation['plot']>): void {

@@ -75,6 +75,6 @@ export interface SheetCalculation {
 export interface SheetTable {
   caption: string;
   /** share of the width, and how the cells stand; `number` = figures of one width, at the right */
-  columns: { head: string; share: number; align: 'left' | 'number' }[];
+  columns: { head: string; share: number; align: 'left' | 'number'; ink?: Ink }[];
   rows: { cells: string[]; strong?: boolean }[];
 }

@@ -65,7 +65,7 @@ export function drawMeasured(writer: SheetWriter, measured: SheetModel['measured
     maybeTable(writer, {
       caption: '',
       columns: [
-        { head: sheetText.coupling, share: 20, align: 'left' }, { head: sheetText.path, share: 13, align: 'left' }, { head: '_J_ / Hz', share: 10, align: 'number' },
+        { head: sheetText.coupling, share: 20, align: 'left' }, { head: sheetText.path, share: 13, align: 'left' }, { head: '_J_ / Hz', share: 10, align: 'number', ink: 'measured' },
         { head: '±', share: 8, align: 'number' }, { head: sheetText.atPartner, share: 12, align: 'number' }, { head: sheetText.from, share: 37, align: 'left' },
       ],
       rows: measured.readings.map((reading) => ({ cells: [reading.coupling, reading.path, reading.jTyped, reading.seTyped, reading.partnerTyped, reading.from] })),

@@ -1,5 +1,5 @@
 import type { SheetTable } from './model';
-import { PAPER } from './palette';
+import { INK_COLOUR, PAPER } from './palette';
 import type { Line, TextStyle } from './textLayout';
 import { STYLE, type SheetWriter } from './writer';
 
@@ -29,8 +29,10 @@ export function drawTable(writer: SheetWriter, table: SheetTable, options: { x?:
   const headStyle = () => STYLE.column;
   const head = row(columns.map((column) => column.head), headStyle, 'TH');
   const bodies = table.rows.map(({ cells, strong }) => row(cells, (i) => {
-    const base = strong || i === 0 ? STYLE.strong : STYLE.body;
-    return columns[i]!.align === 'number' ? { ...base, tabular: true } : base;
+    const { ink, align } = columns[i]!;
+    const plain = strong || i === 0 || ink ? STYLE.strong : STYLE.body;
+    const base = ink ? { ...plain, colour: INK_COLOUR[ink] } : plain;
+    return align === 'number' ? { ...base, tabular: true } : base;
   }, 'TD'));
   writer.ensure(head.height + (bodies[0]?.height ?? 0) + 4);
   writer.part('Table', () => {

@@ -35,7 +35,7 @@ export const sheetText = {
 
   noCalculation: 'No relation has been asked yet.',
   candidates: 'Candidates',
-  candidate: 'Candidate', verdict: 'Verdict',
+  candidate: 'Candidate', verdict: 'Verdict', why: 'Why',
   noneOfThese: 'none of these',
   noneOfTheseOpen: 'open',
   noneOfTheseFits: 'no named candidate fits',

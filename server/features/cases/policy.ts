@@ -51,10 +51,6 @@ const standing = (sentence: string): Refusal => ({ kind: 'wrong-state', sentence
 const held = (sentence: string): Refusal => ({ kind: 'held-by-another', sentence });
 const inReview = (state: CaseState) => state === 'in-review' || state === 'queried';
 
-function chemist(role: ProjectRole): Refusal | null {
-  return atLeast(role, 'chemist') ? null : person(words.readerOnly);
-}
-
 /** May this person hold reviews of this case at all, whatever its state? */
 function independent(facts: CaseFacts, role: ProjectRole): Refusal | null {
   if (facts.isAuthor) return person(words.ownCase);
@@ -72,13 +68,11 @@ function holder(facts: CaseFacts, role: ProjectRole): Refusal | null {
 }
 
 const RULES: Record<CaseAct, (facts: CaseFacts, role: ProjectRole) => Refusal | null> = {
-  edit: (facts, role) => chemist(role) ?? (facts.state === 'draft' || facts.state === 'queried' ? null : standing(words.readOnly(facts.state))),
-  attach: (facts, role) => chemist(role) ?? (facts.state === 'draft' || facts.state === 'queried' ? null : standing(words.readOnly(facts.state))),
-  comment: (facts, role) => chemist(role) ?? (facts.state === 'superseded' || facts.state === 'withdrawn' ? standing(words.closed(facts.state)) : null),
-  submit: (facts, role) => {
+  edit: (facts) => (facts.state === 'draft' || facts.state === 'queried' ? null : standing(words.readOnly(facts.state))),
+  attach: (facts) => (facts.state === 'draft' || facts.state === 'queried' ? null : standing(words.readOnly(facts.state))),
+  comment: (facts) => (facts.state === 'superseded' || facts.state === 'withdrawn' ? standing(words.closed(facts.state)) : null),
+  submit: (facts) => {
     if (!facts.isAuthor) return person(words.authorSubmits);
-    const refused = chemist(role);
-    if (refused) return refused;
     if (facts.state !== 'draft' && facts.state !== 'queried') return standing(words.alreadySent(facts.state));
     return facts.openQueries.length > 0 ? standing(words.answerFirst(facts.openQueries)) : null;
   },
@@ -100,7 +94,7 @@ const RULES: Record<CaseAct, (facts: CaseFacts, role: ProjectRole) => Refusal | 
   answerQuery: (facts, role) => {
     if (!inReview(facts.state)) return standing(words.notInReview(facts.state));
     if (facts.openQueries.length + facts.answeredQueries.length === 0) return standing(words.noQuery);
-    if (facts.isAuthor) return chemist(role);
+    if (facts.isAuthor) return null;
     return holder(facts, role) ? person(words.authorAnswers) : null;
   },
   sign: (facts, role) => {
@@ -114,24 +108,26 @@ const RULES: Record<CaseAct, (facts: CaseFacts, role: ProjectRole) => Refusal | 
   withdraw: (facts, role) => {
     if (facts.state === 'superseded' || facts.state === 'withdrawn') return standing(words.closed(facts.state));
     if (role === 'lead') return null;
-    return facts.isAuthor ? chemist(role) : person(words.authorOrLead);
+    return facts.isAuthor ? null : person(words.authorOrLead);
   },
   supersede: (facts, role) => {
     if (facts.state !== 'signed') return standing(words.onlySigned);
-    if (role !== 'lead' && !(facts.isAuthor && atLeast(role, 'chemist'))) return person(words.authorOrLead);
+    if (role !== 'lead' && !facts.isAuthor) return person(words.authorOrLead);
     return facts.successor ? standing(words.successor(facts.successor)) : null;
   },
   reopen: (facts, role) => {
     if (!inReview(facts.state)) return standing(words.notInReview(facts.state));
     if (role === 'lead') return null;
-    return facts.isAuthor ? chemist(role) : person(words.authorOrLead);
+    return facts.isAuthor ? null : person(words.authorOrLead);
   },
-  addend: (facts, role) => chemist(role) ?? (facts.state === 'signed' ? null : standing(words.onlySigned)),
+  addend: (facts) => (facts.state === 'signed' ? null : standing(words.onlySigned)),
 };
 
 /** @returns null when the act is allowed now, else one sentence that says why it is not and what would open it, with its kind */
 export function refusal(act: CaseAct, facts: CaseFacts): Refusal | null {
   if (facts.role === null) return person(words.notMember);
+  // whoever became a reader while holding a case may still give it back
+  if (facts.role === 'reader' && !(act === 'release' && facts.isHolder)) return person(words.readerOnly);
   return RULES[act](facts, facts.role);
 }
 

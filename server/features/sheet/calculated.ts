@@ -8,8 +8,8 @@ import { sheetText as words } from '@/shared/text/sheet';
 import type { QuickLookAnswer } from '@/shared/types/answer';
 import type { Calculation } from '@/shared/types/case';
 import type { CaseTrail } from '@/shared/types/trail';
-import type { SheetInput } from './input';
 import { literal } from '@/server/pdf/textLayout';
+import { sentences, type SheetInput } from './input';
 
 type Made = CaseTrail['calculations'][number];
 
@@ -19,6 +19,16 @@ function groupName(text: string): string {
     return groupLabel(groupOf(text));
   } catch {
     return literal(text);
+  }
+}
+/** On the dial there is room for few letters: a longer name gives way to its first atom. */
+function shortName(text: string): string {
+  const name = groupName(text);
+  if ([...name].length <= 4) return name;
+  try {
+    return groupOf(text).element;
+  } catch {
+    return '';
   }
 }
 const pair = ([a, b]: readonly [string, string]): string => `${groupName(a)}, ${groupName(b)}`;
@@ -38,15 +48,15 @@ function anglePlot(input: SheetInput, calculation: Calculation, answer: QuickLoo
   const row = relation ? input.registry.find(`${relation.id}@${relation.version}`) : undefined;
   if (!single || !relation || !row || row.kind === 'class-table' || calculation.bond !== 'single') return null;
   const groups = calculation.groups ?? null;
-  const first = single.roots.find(({ phiDeg }) => phiDeg >= 0) ?? single.roots[0];
+  // the root farthest from 0: there the two H do not hide each other
+  const first = [...single.roots].sort((a, b) => Math.abs(b.phiDeg) - Math.abs(a.phiDeg))[0];
   const arc = single.arcs[0];
-  const size = { ...reading, jHz: single.roots.length > 0 || reading.jHz >= 0 ? reading.jHz : reading.jHz };
   return {
     kind: 'angle',
-    curve: { points: curve(row, row.kind === 'generalised' ? { groups } : {}, 2), spreadHz: relation.spreadHz, reading: { jHz: size.jHz, seHz: reading.seHz, limit: reading.limit }, roots: single.roots, arcs: single.arcs },
+    curve: { points: curve(row, row.kind === 'generalised' ? { groups } : {}, 2), spreadHz: relation.spreadHz, reading: { jHz: reading.jHz, seHz: reading.seHz, limit: reading.limit }, roots: single.roots, arcs: single.arcs },
     dial: {
       phiDeg: first?.phiDeg ?? (arc ? (arc.fromDeg + arc.toDeg) / 2 : 60), arcs: single.arcs,
-      groups: groups ? { front: [groupName(groups.front[0]), groupName(groups.front[1])], rear: [groupName(groups.rear[0]), groupName(groups.rear[1])] } : null,
+      groups: groups ? { front: [shortName(groups.front[0]), shortName(groups.front[1])], rear: [shortName(groups.rear[0]), shortName(groups.rear[1])] } : null,
     },
     measuredLabel: words.measuredAt(hzAsTyped(reading)),
     alt: words.curveAlt(hzAsTyped(reading), single.roots.length === 0 ? plainText(words.noRoot) : plainText(rootsText(answer)), plainText(arcsText(answer))),
@@ -63,10 +73,10 @@ function doublePlot(answer: QuickLookAnswer): SheetCalculation['plot'] {
   };
 }
 
-function answeredLines(calculation: Calculation, answer: QuickLookAnswer): [string, string][] {
+function answeredLines(calculation: Calculation, answer: QuickLookAnswer, said: Set<string>): [string, string][] {
   const lines: [string, string][] = [];
   const step = answer.steps.find(({ formula }) => formula !== undefined);
-  if (step?.formula) lines.push([words.formula, step.formula]);
+  if (step?.formula && !said.has(step.formula)) lines.push([words.formula, step.formula]);
   if (step?.worked) lines.push([words.worked, step.worked]);
   const bond = calculation.bond === 'single' ? words.turning[calculation.turning ?? 'unknown'] : calculation.ringSize ? words.ringSize(calculation.ringSize) : '';
   lines.push([words.groups, [groupsText(calculation), bond].filter((part) => part !== '').join('; ')]);
@@ -79,11 +89,14 @@ function answeredLines(calculation: Calculation, answer: QuickLookAnswer): [stri
     lines.push([words.likelihoods, answer.double.likelihoods.map(({ geometry, weight }) => `${words.geometry[geometry]} ${inHundred(weight)}`).join(', ')]);
   }
   if (answer.rulesOut.length > 0) lines.push([words.rulesOut, answer.rulesOut.join(' ')]);
-  if (answer.cannotTell.length > 0) lines.push([words.cannotTell, answer.cannotTell.join(' ')]);
+  const fresh = answer.cannotTell.filter((sentence) => !said.has(sentence));
+  if (fresh.length > 0) lines.push([words.cannotTell, fresh.join(' ')]);
+  for (const one of [...fresh, step?.formula ?? '']) said.add(one);
   return lines;
 }
 
-function calculationPart(input: SheetInput, made: Made): SheetCalculation | null {
+/** @param said formulas and sentences that an earlier calculation of this sheet has printed: they are not repeated */
+function calculationPart(input: SheetInput, made: Made, said: Set<string>): SheetCalculation | null {
   const { content } = input;
   const calculation = content.calculations.find(({ id }) => id === made.calculationId);
   const at = content.readings.findIndex(({ id }) => id === made.readingId);
@@ -99,11 +112,11 @@ function calculationPart(input: SheetInput, made: Made): SheetCalculation | null
   }
   const { relation } = result;
   return {
-    title: `${title} = ${hzAsTyped(result.reading)} ± ${hz(result.reading.seHz, result.reading.seHz < 0.1 ? 2 : 1)}`,
+    title: `${title} ${result.reading.limit === 'none' ? '= ' : ''}${hzAsTyped(result.reading)} ± ${hz(result.reading.seHz, result.reading.seHz < 0.1 ? 2 : 1)}`,
     relation: relation ? `${relation.name}; ${relation.citation}${relation.doi ? `; doi ${relation.doi}` : ''}; ${relation.id}, ${words.version(relation.version)}` : '',
-    answer: { grade: result.grade, gradeWord: GRADE_WORDS[result.grade], sentence: [result.headline, result.detail].filter((part) => part !== '').join(' ') },
+    answer: { grade: result.grade, gradeWord: GRADE_WORDS[result.grade], sentence: sentences(result.headline, result.detail) },
     plot: result.bond === 'single' ? anglePlot(input, calculation, result) : doublePlot(result),
-    lines: answeredLines(calculation, result), table: null,
+    lines: answeredLines(calculation, result, said), table: null,
   };
 }
 
@@ -119,7 +132,7 @@ function candidatesTable(input: SheetInput): SheetTable | null {
   const rows = content.candidates.map((candidate) => {
     const finding = trail.candidates.find(({ candidateId }) => candidateId === candidate.id);
     const status = finding?.status ?? 'not-tested';
-    const why = finding?.verdicts.filter(({ verdict }) => verdict !== 'not-tested').map((verdict) => `${literal(label(verdict.calculationId))}: ${words.verdictWord[verdict.verdict]}. ${verdict.why}`).join(' ') ?? '';
+    const why = finding?.verdicts.filter(({ verdict }) => verdict !== 'not-tested').map((verdict) => `${literal(label(verdict.calculationId))}: ${verdict.why}`).join(' ') ?? '';
     const name = [literal(candidate.name.trim()), literal(candidate.description.trim())].filter((part) => part !== '').join('; ');
     return { cells: [name, words.verdictWord[status], why] };
   });
@@ -127,15 +140,16 @@ function candidatesTable(input: SheetInput): SheetTable | null {
   rows.push({ cells: [words.noneOfThese, allOut ? words.noneOfTheseFits : words.noneOfTheseOpen, ''] });
   return {
     caption: words.candidates,
-    columns: [{ head: words.candidate, share: 30, align: 'left' }, { head: words.verdict, share: 14, align: 'left' }, { head: words.by, share: 56, align: 'left' }],
+    columns: [{ head: words.candidate, share: 30, align: 'left' }, { head: words.verdict, share: 14, align: 'left' }, { head: words.why, share: 56, align: 'left' }],
     rows,
   };
 }
 
 export function calculatedPart(input: SheetInput): Pick<SheetModel, 'calculations' | 'candidates' | 'excluded' | 'calculatedNote'> {
   const { trail } = input;
+  const said = new Set<string>();
   return {
-    calculations: trail.calculations.flatMap((made) => calculationPart(input, made) ?? []),
+    calculations: trail.calculations.flatMap((made) => calculationPart(input, made, said) ?? []),
     candidates: candidatesTable(input),
     excluded: trail.notTested.length > 0 ? [words.notTestedLine(trail.notTested.join(', '))] : [],
     calculatedNote: trail.calculations.length === 0 ? words.noCalculation : [...new Set(trail.relations.map(({ name }) => name))].join('; '),

@@ -34,3 +34,9 @@ export const time = (input: SheetInput, at: Date): string => dateTimeIn(at, inpu
 
 /** 64 characters in fours are read and compared more easily. */
 export const groupedHash = (hash: string, characters = hash.length): string => (hash.slice(0, characters).match(/.{1,4}/g) ?? []).join('\u00a0');
+
+/** Parts as sentences: each ends with a stop before the next begins. */
+export const sentences = (...parts: string[]): string => {
+  const told = parts.map((part) => part.trim()).filter((part) => part !== '');
+  return told.map((part, i) => (i < told.length - 1 && !/[.!?:]$/.test(part) ? `${part}.` : part)).join(' ');
+};

@@ -3,12 +3,10 @@ import { differs } from '@/server/features/cases/gaps';
 import { GRADE_WORDS, STATE_WORDS } from '@/shared/format/words';
 import { sheetText as words } from '@/shared/text/sheet';
 import { calculatedPart } from './calculated';
-import { groupedHash, isSigned, reviewSignatures, time, type SheetInput } from './input';
+import { groupedHash, isSigned, reviewSignatures, sentences, time, type SheetInput } from './input';
 import { judgedPart } from './judged';
 import { literal } from '@/server/pdf/textLayout';
 import { conditionsText, measuredPart } from './measured';
-
-const sentences = (...parts: string[]): string => parts.map((part) => part.trim()).filter((part) => part !== '').join(' ');
 
 /** The person's answer first; the calculated one beside it when they differ, or alone while nobody has judged. */
 function answersOf({ content, trail }: SheetInput): SheetAnswer[] {
@@ -42,7 +40,7 @@ function markOf(input: SheetInput): SheetModel['mark'] {
 
 function openPart({ content, trail }: SheetInput): SheetModel['open'] {
   const grade = content.answer?.grade ?? trail.answer.grade;
-  const items: [string, string][] = trail.measureNext.map(({ title, detail }) => [words.nextMeasurement, sentences(/[.!?]$/.test(title) ? title : `${title}.`, detail)]);
+  const items: [string, string][] = trail.measureNext.map(({ title, detail }) => [words.nextMeasurement, sentences(title, detail)]);
   return { lead: grade === 'not-decided' ? words.openNotDecided : words.openDecided, items };
 }
 
