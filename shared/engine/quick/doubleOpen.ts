@@ -43,10 +43,11 @@ function nextFor(context: DoubleContext, cls: AlkeneClassModel | null, decided: 
   ];
 }
 
-/** Geometries that a limit alone closes: every value held lies beyond it by more than the spread. */
+/** Geometries that an upper limit alone closes: it lies below the undecided stretch, and below every value held by twice the spread. */
 function closedByLimit(context: DoubleContext, cls: AlkeneClassModel): string[] {
   const { reading } = context.readings;
-  if (reading.limit !== 'upper') return [];
+  const stretch = undecidedStretch(cls, context.kind?.elements ?? [], context.model.row);
+  if (reading.limit !== 'upper' || (stretch && reading.jHz >= stretch[0])) return [];
   return (['cis', 'trans'] as const).flatMap((g) => {
     const d = cls.distributions[g];
     return d && reading.jHz + 2 * d.spreadHz < d.rangeHz[0] ? [say.rulesOutLimit(g, d.rangeHz[0])] : [];
