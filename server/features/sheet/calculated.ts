@@ -24,7 +24,7 @@ function groupName(text: string): string {
 /** On the dial there is room for few letters: a longer name gives way to its first atom. */
 function shortName(text: string): string {
   const name = groupName(text);
-  if ([...name].length <= 4) return name;
+  if ([...name].length <= 3) return name;
   try {
     return groupOf(text).element;
   } catch {
