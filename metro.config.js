@@ -1,12 +1,17 @@
 // Metro bundles the web client. Three things differ from Expo's defaults: folders that never belong to the
 // client are out of its sight, parts of zod and react-native-web that it never needs are replaced by
 // small stand-ins, and in development /api goes to the server, so that cookies stay same-origin.
+const { createHash } = require('node:crypto');
+const { readFileSync } = require('node:fs');
 const http = require('node:http');
 const path = require('node:path');
 const { getDefaultConfig } = require('expo/metro-config');
 
 const root = __dirname;
 const config = getDefaultConfig(root);
+
+// Babel writes app.json into the bundle, yet Metro's cache does not look at it: an old one would go on.
+config.cacheVersion = createHash('sha256').update(readFileSync(path.join(root, 'app.json'))).digest('hex').slice(0, 16);
 
 const escaped = (text) => text.replace(/[.*+?^${}()|[\]\\/]/g, '\\$&');
 const outside = ['server', 'tests', 'scripts', 'build', 'dist', '.data', 'docs', 'coverage']
