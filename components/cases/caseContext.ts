@@ -24,12 +24,11 @@ export interface CaseView {
 
 /** Every sheet of the case screen; one is open at a time. `key` of a step is the trail's. */
 export type CaseSheet =
-  | { kind: 'compound' | 'conditions' | 'answer' | 'submit' | 'withdraw' | 'supersede' | 'addend' | 'sign' | 'more' | 'discard' | 'reopen' }
+  | { kind: 'compound' | 'conditions' | 'answer' | 'submit' | 'withdraw' | 'supersede' | 'addend' | 'sign' | 'more' | 'discard' | 'reopen' | 'trail' }
   | { kind: 'reading' | 'candidate' | 'evidence'; id: string | null }
   | { kind: 'calculation'; readingId: string; id: string | null }
   | { kind: 'step'; key: string }
-  | { kind: 'query'; stepKey: string | null }
-  | { kind: 'comment'; target: string; label: string };
+  | { kind: 'query'; stepKey: string | null };
 
 export const CaseContext = createContext<CaseView | null>(null);
 

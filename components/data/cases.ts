@@ -86,7 +86,7 @@ export function useSupersedeCase(id: string) {
 export const revisionsOptions = (id: string) => queryOptions<RevisionsResponse, ApiProblem>({
   queryKey: [...caseKeys.history(id), 'revisions'], queryFn: ({ signal }) => api.get(`/api/cases/${id}/revisions`, 'revisionsResponse', { signal }),
 });
-export const useRevisions = (id: string) => useQuery(revisionsOptions(id));
+export const useRevisions = (id: string, enabled: boolean) => useQuery({ ...revisionsOptions(id), enabled });
 /** A revision never changes: once read it is kept. */
 export const useRevision = (id: string, number: number | null) => useQuery<RevisionResponse, ApiProblem>({
   queryKey: ['cases', 'revision', id, number], enabled: number !== null, staleTime: STALE.never,

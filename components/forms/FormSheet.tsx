@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
+import { uiCaseParts } from '@/shared/text/uiCaseParts';
 import { uiCases } from '@/shared/text/uiCases';
 
 import { space } from '../theme/tokens';
@@ -16,6 +17,8 @@ export interface FormSheetProps {
   busy?: string | false;
   /** a second way to end: "Save and next", "Keep as typed" */
   second?: { label: string; onPress: () => void };
+  /** the form is kept half-typed when it is closed; this throws it away */
+  onDiscard?: () => void;
   danger?: boolean;
   /** stands under the buttons: "3 fields to mend. Nothing typed is lost." */
   foot?: string;
@@ -24,12 +27,12 @@ export interface FormSheetProps {
 }
 
 /** A sheet with a form: its fields at the page's distance, the acts fixed at its foot. */
-export function FormSheet({ title, onClose, act, onAct, busy = false, second, danger = false, foot, actDisabledBecause, children }: FormSheetProps) {
+export function FormSheet({ title, onClose, act, onAct, busy = false, second, onDiscard, danger = false, foot, actDisabledBecause, children }: FormSheetProps) {
   return (
     <Sheet title={title} onClose={onClose} actions={
       <View style={styles.foot}>
         <View style={styles.actions}>
-          {second ? <Button label={second.label} onPress={second.onPress} grow={1} /> : <Button label={uiCases.act.cancel} onPress={onClose} grow={1} />}
+          <Button grow={1} label={second?.label ?? (onDiscard ? uiCaseParts.readings.discard : uiCases.act.cancel)} onPress={second?.onPress ?? (() => { onDiscard?.(); onClose(); })} />
           <Button label={act} kind={danger ? 'danger' : 'primary'} busy={busy} onPress={onAct} grow={2} disabledBecause={actDisabledBecause} />
         </View>
         {foot !== undefined && <Text kind="small" tone="error" align="center">{foot}</Text>}

@@ -22,5 +22,8 @@ export function useKeptForm<Form extends object>(userId: string, key: string, in
 }
 
 const isRecord = (value: unknown): value is Record<string, unknown> => typeof value === 'object' && value !== null && !Array.isArray(value);
+/** A value of the field's own type; a link to another row (`…Id`) may also be empty. */
+const fits = (name: string, value: unknown, initial: unknown): boolean =>
+  typeof value === typeof initial && (value !== null || initial === null) || (name.endsWith('Id') && (value === null || typeof value === 'string'));
 const known = <Form extends object>(kept: Record<string, unknown>, initial: Form): Partial<Form> =>
-  Object.fromEntries(Object.entries(kept).filter(([name, value]) => name in initial && typeof value === typeof initial[name as keyof Form])) as Partial<Form>;
+  Object.fromEntries(Object.entries(kept).filter(([name, value]) => name in initial && fits(name, value, initial[name as keyof Form]))) as Partial<Form>;

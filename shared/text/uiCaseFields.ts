@@ -44,7 +44,8 @@ export function calculationWords(calculation: Calculation): string {
   return `double bond${ring}; ${groups}`;
 }
 
-const degrees = (value: number): string => `${value < 0 ? '−' : ''}${Math.abs(value)}°`;
+export const numberText = (value: number): string => `${value < 0 ? '−' : ''}${Math.abs(value)}`;
+const degrees = (value: number): string => `${numberText(value)}°`;
 export const claimWords = (claim: CandidateClaim): string =>
   claim.kind === 'geometry' ? claim.geometry : `_φ_ ${degrees(claim.fromDeg)} to ${degrees(claim.toDeg)}`;
 

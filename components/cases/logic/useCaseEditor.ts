@@ -25,6 +25,9 @@ export interface CaseEditor {
   state: EditorState;
   content: CaseContent;
   edit: (change: (content: CaseContent) => CaseContent) => void;
+  /** a removal: taken back by `undo` until the next change, in place of "are you sure" */
+  remove: (name: string, change: (content: CaseContent) => CaseContent) => void;
+  removed: { name: string; undo: () => void } | null;
   setReason: (reason: string) => void;
   again: () => void;
   choose: (content: CaseContent) => void;
@@ -39,14 +42,16 @@ export interface CaseEditor {
  * Edits of one case: on the device at once, on the server a moment after the last change, by themselves again when the
  * server or the session comes back. `reader` is the person who types; it stays the same while the session is out.
  */
-export function useCaseEditor({ found, reader, isSignedIn, save, refetch }: {
-  found: CaseResponse; reader: string; isSignedIn: boolean; save: (request: SaveCaseRequest) => Promise<CaseResponse>; refetch: () => void;
+export function useCaseEditor({ found, reader, isSignedIn, mayEdit, save, refetch }: {
+  found: CaseResponse; reader: string; isSignedIn: boolean; mayEdit: boolean; save: (request: SaveCaseRequest) => Promise<CaseResponse>; refetch: () => void;
 }): CaseEditor {
   const [state, dispatch] = useReducer(editorReducer, null, () => openEditor(savedOf(found), asksReason(found), readDraft(reader, draftKey(found.id), isDraft)));
   const [isKept, setKept] = useState(true);
   const connectionWas = useRef(true);
   const latest = useRef(state);
+  const outside = useRef({ save, refetch, mayEdit });
   useLayoutEffect(() => { latest.current = state; }, [state]);
+  useLayoutEffect(() => { outside.current = { save, refetch, mayEdit }; });
 
   // what other acts on the case (a claim, a comment, a colleague's save) brought in
   useEffect(() => { dispatch({ kind: 'refreshed', saved: savedOf(found), needsReason: asksReason(found) }); }, [found]);
@@ -59,7 +64,7 @@ export function useCaseEditor({ found, reader, isSignedIn, save, refetch }: {
   const send = useCallback(() => {
     const { base, content, reason, needsReason } = latest.current;
     dispatch({ kind: 'sending' });
-    save({ seenVersion: base.version, content, ...(needsReason ? { reason: reason.trim() } : {}) }).then(
+    outside.current.save({ seenVersion: base.version, content, ...(needsReason ? { reason: reason.trim() } : {}) }).then(
       (saved) => {
         // also when the screen has been left meanwhile: nothing newer is on the device, so nothing is to be offered again
         if (same(latest.current.content, content)) dropDraft(reader, draftKey(saved.id));
@@ -67,16 +72,17 @@ export function useCaseEditor({ found, reader, isSignedIn, save, refetch }: {
       },
       (problem: unknown) => {
         const told = problem instanceof ApiProblem ? problem : null;
-        if (told?.is('changed-meanwhile')) { dispatch({ kind: 'failed', why: 'offline' }); refetch(); return; }
+        if (told?.is('changed-meanwhile')) { dispatch({ kind: 'failed', why: 'offline' }); outside.current.refetch(); return; }
         if (told?.is('not-signed-in')) { dispatch({ kind: 'failed', why: 'signed-out' }); return; }
         // a server that is away, overloaded or restarting has refused nothing: the change waits and is tried again
         if (told === null || told.is('offline') || told.is('unavailable') || told.is('unreadable-answer') || told.is('internal') || told.is('too-many-tries')) { dispatch({ kind: 'failed', why: 'offline' }); return; }
         dispatch({ kind: 'failed', why: 'refused', sentence: told.body.detail, fields: fieldSentences(told.body.errors ?? []) });
       },
     );
-  }, [save, refetch, reader]);
+  }, [reader]);
 
-  const ready = maySend(state);
+  // a draft found on the device after the case went to review waits for the person; it is not sent into a refusal
+  const ready = maySend(state) && mayEdit;
   useEffect(() => {
     if (!ready) return;
     const timer = setTimeout(send, REST_MS);
@@ -99,7 +105,7 @@ export function useCaseEditor({ found, reader, isSignedIn, save, refetch }: {
   useEffect(() => { if (waitsForSession) dispatch({ kind: 'again' }); }, [waitsForSession]);
 
   // leaving the screen does not wait for the rest: the request goes out, and the draft stays until it is answered
-  useEffect(() => () => { if (maySend(latest.current)) send(); }, [send]);
+  useEffect(() => () => { if (outside.current.mayEdit && maySend(latest.current)) send(); }, [send]);
 
   const edit = useCallback((change: (content: CaseContent) => CaseContent) => {
     const next = change(latest.current.content);
@@ -107,14 +113,24 @@ export function useCaseEditor({ found, reader, isSignedIn, save, refetch }: {
     dispatch({ kind: 'edited', content: next });
   }, []);
 
+  const [removed, setRemoved] = useState<{ name: string; before: CaseContent; after: CaseContent } | null>(null);
+  const remove = useCallback((name: string, change: (content: CaseContent) => CaseContent) => {
+    const before = latest.current.content;
+    edit(change);
+    setRemoved({ name, before, after: latest.current.content });
+  }, [edit]);
+  // a removal can be taken back only while nothing else has changed since
+  const undoable = removed !== null && same(removed.after, state.content) ? removed : null;
+
   return useMemo(() => ({
-    state, content: state.content, edit, isKept,
+    state, content: state.content, edit, remove, isKept,
+    removed: undoable === null ? null : { name: undoable.name, undo: () => { edit(() => undoable.before); setRemoved(null); } },
     setReason: (reason: string) => dispatch({ kind: 'reason', reason }),
     again: () => dispatch({ kind: 'again' }),
     choose: (content: CaseContent) => dispatch({ kind: 'chosen', content }),
     discard: () => dispatch({ kind: 'discarded' }),
     isDirty: isDirty(state), lacksReason: lacksReason(state),
-  }), [state, edit, isKept]);
+  }), [state, edit, remove, undoable, isKept]);
 }
 
 /** Enough of a shape to be shown: the server checks the rest, and what it refuses is named in place. */
