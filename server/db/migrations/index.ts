@@ -23,11 +23,12 @@ import { attachments111 } from './111-attachments';
 import { caseCounts112 } from './112-case-counts';
 import { caseGuards113 } from './113-case-guards';
 import { caseSearch114 } from './114-case-search';
+import { caseStamps115 } from './115-case-stamps';
 import type { Migration } from './step';
 
 /** Every migration by name, in order: no file is looked up at run time, and the order is reviewed. Never edit one that has run anywhere. */
 export const migrations: readonly Migration[] = [
   grants, users, sessions, rateCounters, passwordResets, projects, memberships, invitations, projectEvents, accountEvents, mailbox,
   cases101, caseTags102, caseRevisions103, caseEvents104, signatures105, addenda106, reviewChecks107, reviewQueries108, queryMessages109,
-  comments110, attachments111, caseCounts112, caseGuards113, caseSearch114,
+  comments110, attachments111, caseCounts112, caseGuards113, caseSearch114, caseStamps115,
 ];

@@ -9,7 +9,7 @@ import { casesText } from '@/shared/text/cases';
 import type { Grade } from '@/shared/types/answer';
 import type { CaseState } from '@/shared/types/case';
 import type { CaseDeps } from './deps';
-import { searchQuery } from './searchText';
+import { searchPatterns, searchQuery } from './searchText';
 
 export type ListQuery = z.output<typeof caseListQuery>;
 type Sort = NonNullable<ListQuery['sort']>;
@@ -32,11 +32,11 @@ interface Filter {
   replacements: Record<string, unknown>;
 }
 
-/** Everything but the project: what a search or a chip asks for. */
-function filterOf(query: ListQuery): Filter {
+/** Everything but the project: what a search or a chip asks for. `inText` leaves the search to who looks into the text itself. */
+function filterOf(query: ListQuery, inText = false): Filter {
   const where: string[] = [];
   const replacements: Record<string, unknown> = {};
-  const search = query.q ? searchQuery(query.q) : null;
+  const search = query.q && !inText ? searchQuery(query.q) : null;
   if (search !== null) {
     where.push('MATCH (c.search_text) AGAINST (:search IN BOOLEAN MODE)');
     replacements.search = search;
@@ -72,9 +72,9 @@ const plainDate = (value: string): boolean => /^\d{4}-\d\d-\d\d( \d\d:\d\d:\d\d\
  * The ids of one page, newest first. Each project is read along its own index and stops after one page, and the few rows are
  * merged: the cost does not grow with the log. A search goes through the full-text index in one piece.
  */
-export function pageStatement(query: ListQuery, projectIds: readonly string[], limit: number): Statement {
+export function pageStatement(query: ListQuery, projectIds: readonly string[], limit: number, inText = false): Statement {
   const order = ORDERS[query.sort ?? 'changed'];
-  const { where, replacements } = filterOf(query);
+  const { where, replacements } = filterOf(query, inText);
   if (query.cursor) {
     const { value, id } = decodeCursor(query.cursor);
     if (order.column !== 'code_order' && !plainDate(value)) decodeCursor('');
@@ -96,6 +96,34 @@ export function pageStatement(query: ListQuery, projectIds: readonly string[], l
     return `(${select(`cases c FORCE INDEX (${index})`, `c.project_id = :p${i}`)})`;
   });
   return { sql: parts.length === 1 ? parts[0]! : `${parts.join(' UNION ALL ')} ${tail}`, replacements };
+}
+
+/** How many of the first cases are looked into before the full-text index is asked. */
+const LOOKED_INTO = 200;
+
+/**
+ * A search among the first cases of the list alone. What many cases hold fills a page from there, without ordering thousands
+ * of hits; when this gives less than a page, the full-text index answers.
+ */
+export function nearStatement(query: ListQuery, projectIds: readonly string[], limit: number): Statement {
+  const { sql, replacements } = pageStatement(query, projectIds, LOOKED_INTO, true);
+  const direction = ORDERS[query.sort ?? 'changed'].descending ? 'DESC' : 'ASC';
+  const looks = searchPatterns(query.q ?? '').map((pattern, i) => {
+    replacements[`look${i}`] = pattern;
+    return `c.search_text LIKE :look${i} COLLATE utf8mb4_bin`;
+  });
+  return {
+    sql: `SELECT t.id, t.place FROM (${sql}) t JOIN cases c ON c.id = t.id WHERE ${looks.join(' AND ')} ORDER BY t.place ${direction}, t.id ${direction} LIMIT ${limit}`, replacements,
+  };
+}
+
+async function pageIds(deps: CaseDeps, query: ListQuery, projectIds: readonly string[], limit: number): Promise<string[]> {
+  const read = async ({ sql, replacements }: Statement) => (await deps.db.query<{ id: string }>(sql, { replacements, type: QueryTypes.SELECT })).map(({ id }) => id);
+  if (query.q && searchPatterns(query.q).length > 0) {
+    const near = await read(nearStatement(query, projectIds, limit));
+    if (near.length === limit) return near;
+  }
+  return read(pageStatement(query, projectIds, limit));
 }
 
 interface RawRow {
@@ -150,9 +178,33 @@ export function countStatement(query: ListQuery, projectIds: readonly string[]):
   return { sql: source, replacements: { ...replacements, projects: [...projectIds] } };
 }
 
-async function countOf(deps: CaseDeps, query: ListQuery, projectIds: readonly string[]): Promise<Counts> {
-  const { sql, replacements } = countStatement(query, projectIds);
-  return sum(await deps.db.query<{ state: CaseState; grade: Grade; n: number | string }>(sql, { replacements, type: QueryTypes.SELECT }));
+type Count = (query: ListQuery, projectIds: readonly string[]) => Promise<Counts>;
+const KEPT = 300;
+
+/**
+ * Counts, exact at any time: one of a search is kept until the stamp of a project in it moves, and the database raises that
+ * with every change that could alter a count.
+ */
+function counting(deps: CaseDeps): Count {
+  const kept = new Map<string, Counts>();
+  const fresh: Count = async (query, projectIds) => {
+    const { sql, replacements } = countStatement(query, projectIds);
+    return sum(await deps.db.query<{ state: CaseState; grade: Grade; n: number | string }>(sql, { replacements, type: QueryTypes.SELECT }));
+  };
+  return async (query, projectIds) => {
+    if (!query.q) return fresh(query, projectIds);
+    const stamps = await deps.db.query<{ project_id: string; stamp: string }>(
+      'SELECT project_id, stamp FROM case_stamps WHERE project_id IN (:projects) ORDER BY project_id', { replacements: { projects: [...projectIds] }, type: QueryTypes.SELECT });
+    const { q, state, grade, person, tag, compound } = query;
+    const key = JSON.stringify([stamps.map(({ project_id: id, stamp }) => [id, stamp]), q, state, grade, person, tag, compound]);
+    const known = kept.get(key);
+    if (known) return known;
+    const counts = await fresh(query, projectIds);
+    const oldest = kept.size >= KEPT ? kept.keys().next().value : undefined;
+    if (oldest !== undefined) kept.delete(oldest);
+    kept.set(key, counts);
+    return counts;
+  };
 }
 
 /** What the chips offer: projects of the person, authors and tags in them. Both lists hop along an index, one step a name. */
@@ -183,27 +235,29 @@ const present = (row: RawRow, tags: string[], now: Date): CaseRow => ({
 });
 
 /** One page of the log, always within the projects of the person. */
-export const caseList = (deps: CaseDeps) => async (who: Actor, query: ListQuery): Promise<CaseListResponse> => {
-  const projectIds = query.project ? who.projectIds.filter((id) => id === query.project) : who.projectIds;
-  if (query.project && projectIds.length === 0) throw new Problem('not-found', casesText.notFoundProject);
-  if (query.cursor) decodeCursor(query.cursor);
-  const filters = await filtersOf(deps, who);
-  if (projectIds.length === 0) return { cases: [], nextCursor: null, total: 0, open: 0, notDecided: 0, filters, elsewhere: 0 };
-  const limit = query.limit ?? LIMITS.pageSize;
-  const sort = query.sort ?? 'changed';
-  const { sql, replacements } = pageStatement(query, projectIds, limit + 1);
-  const narrowed = query.q !== undefined && query.q !== '' && [query.project, query.state, query.grade, query.person, query.tag, query.compound].some((one) => one !== undefined);
-  const [ids, counts, everywhere] = await Promise.all([
-    deps.db.query<{ id: string }>(sql, { replacements, type: QueryTypes.SELECT }),
-    countOf(deps, query, projectIds),
-    narrowed ? countOf(deps, { q: query.q }, who.projectIds) : null,
-  ]);
-  const page = ids.slice(0, limit).map(({ id }) => id);
-  const [rows, tags] = await Promise.all([rowsOf(deps, page), tagsOf(deps, page)]);
-  const last = rows[rows.length - 1];
-  return {
-    cases: rows.map((row) => present(row, tags.get(row.id) ?? [], deps.now())),
-    nextCursor: ids.length > limit && last ? encodeCursor(placeOf(last, sort), last.id) : null,
-    ...counts, filters, elsewhere: everywhere ? Math.max(0, everywhere.total - counts.total) : 0,
+export const caseList = (deps: CaseDeps) => {
+  const countOf = counting(deps);
+  return async (who: Actor, query: ListQuery): Promise<CaseListResponse> => {
+    const projectIds = query.project ? who.projectIds.filter((id) => id === query.project) : who.projectIds;
+    if (query.project && projectIds.length === 0) throw new Problem('not-found', casesText.notFoundProject);
+    if (query.cursor) decodeCursor(query.cursor);
+    const filters = await filtersOf(deps, who);
+    if (projectIds.length === 0) return { cases: [], nextCursor: null, total: 0, open: 0, notDecided: 0, filters, elsewhere: 0 };
+    const limit = query.limit ?? LIMITS.pageSize;
+    const sort = query.sort ?? 'changed';
+    const narrowed = query.q !== undefined && query.q !== '' && [query.project, query.state, query.grade, query.person, query.tag, query.compound].some((one) => one !== undefined);
+    const [ids, counts, everywhere] = await Promise.all([
+      pageIds(deps, query, projectIds, limit + 1),
+      countOf(query, projectIds),
+      narrowed ? countOf({ q: query.q }, who.projectIds) : null,
+    ]);
+    const page = ids.slice(0, limit);
+    const [rows, tags] = await Promise.all([rowsOf(deps, page), tagsOf(deps, page)]);
+    const last = rows[rows.length - 1];
+    return {
+      cases: rows.map((row) => present(row, tags.get(row.id) ?? [], deps.now())),
+      nextCursor: ids.length > limit && last ? encodeCursor(placeOf(last, sort), last.id) : null,
+      ...counts, filters, elsewhere: everywhere ? Math.max(0, everywhere.total - counts.total) : 0,
+    };
   };
 };

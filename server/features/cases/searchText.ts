@@ -13,7 +13,7 @@ export function searchText(parts: readonly string[]): string {
     const characters = [...word].slice(0, 60);
     for (let start = 0; start < characters.length; start += 1) found.add(PREFIX + characters.slice(start).join(''));
   }
-  return [...found].join(' ');
+  return ` ${[...found].join(' ')}`;
 }
 
 /** The same for what somebody looks for: every word must occur, in any place. Null when nothing to look for is left. */
@@ -21,3 +21,7 @@ export function searchQuery(typed: string): string | null {
   const words = compoundWords(typed).slice(0, 12);
   return words.length === 0 ? null : words.map((word) => `+${PREFIX}${[...word].slice(0, 60).join('')}*`).join(' ');
 }
+
+/** The same question for a plain look into the stored text, word by word: patterns for LIKE. [] when nothing to look for is left. */
+export const searchPatterns = (typed: string): string[] =>
+  compoundWords(typed).slice(0, 12).map((word) => `% ${PREFIX}${[...word].slice(0, 60).join('')}%`);

@@ -6,7 +6,7 @@ import { addendumHash, contentHash, signatureHash } from '@/server/features/case
 import { decodeCursor, pageStatement } from '@/server/features/cases/list';
 import { listingOf } from '@/server/features/cases/listing';
 import { formerNames, normalised, checkReferences } from '@/server/features/cases/normalise';
-import { searchQuery, searchText } from '@/server/features/cases/searchText';
+import { searchPatterns, searchQuery, searchText } from '@/server/features/cases/searchText';
 import { targetLabel } from '@/server/features/cases/targets';
 import { Problem } from '@/server/http/problems';
 import { canonicalJson, caseTrail } from '@/shared/engine';
@@ -110,7 +110,11 @@ describe('hashes', () => {
 describe('search', () => {
   const finds = (text: string, typed: string): boolean => {
     const held = searchText([text]).split(' ');
-    return (searchQuery(typed) ?? '').split(' ').every((word) => held.some((one) => one.startsWith(word.slice(1, -1))));
+    // both ways of asking must agree: LIKE over the text, and the prefix of a token
+    const like = searchPatterns(typed).every((pattern) => searchText([text]).includes(pattern.slice(1, -1)));
+    const prefix = (searchQuery(typed) ?? '').split(' ')          .every((word) => held.some((one) => one.startsWith(word.slice(1, -1))));
+    expect(like).toBe(prefix);
+    return prefix;
   };
   it.each([
     ['Aryl tetrahydropyranol HZ-114', 'pyranol'], ['HAZ-0027', 'haz-0027'], ['CDCl₃', 'cdcl3'], ['Łódź amide', 'łódź'], ['Müller', 'muller'], ['2,3-cis', '2'], ['φ sweep', 'φ'],
