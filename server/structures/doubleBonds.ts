@@ -139,7 +139,8 @@ export async function resolveAlkene(smiles: string): Promise<{ bond: DoubleBond;
   const pairs = found.bonds.filter(vicinal);
   const candidates = pairs.length > 0 ? pairs : found.bonds;
   const [first] = candidates;
-  // bonds that differ in nothing the engine sees need no choice
-  const alike = candidates.every((b) => JSON.stringify([b.groups, b.ringSize]) === JSON.stringify([first?.groups, first?.ringSize]));
+  // bonds that differ in nothing the engine sees need no choice; left and right are only names
+  const seen = ({ groups, ringSize }: DoubleBond): string => JSON.stringify([[groups.left.join(), groups.right.join()].sort(), ringSize]);
+  const alike = candidates.every((b) => first && seen(b) === seen(first));
   return first && alike ? { bond: first, note: found.note } : { choose: candidates, note: found.note };
 }

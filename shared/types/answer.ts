@@ -118,7 +118,7 @@ export interface QuickLookAnswer {
   partner: HzReading | null;
   notes: InputNote[];
   grade: Grade;
-  /** likelihood of the leading geometry, where the relation gives one */
+  /** likelihood of the geometry named; null when nothing is decided or the relation gives none */
   likelihood: Fraction | null;
   headline: string;
   detail: string;

@@ -56,11 +56,12 @@ export function judgeClass(
   const none: ClassVerdict = { grade: 'not-decided', geometry: null, reason: 'no-values', likelihoods: [], likelihood: null };
   if (held.length < Math.min(2, possible.length)) return none;
   if (reading.limit !== 'none') return { ...none, reason: 'limit' };
+  // odds beside "not decided" would say the nearer side after all, so inside the stretch none are given
+  const stretch = undecidedStretch(model, elements, row);
+  if (stretch && reading.jHz >= stretch[0] && reading.jHz <= stretch[1]) return { ...none, reason: 'undecided-stretch' };
   const likelihoods = weigh(row, model, reading, possible);
   const best = likelihoods.reduce((a, b) => (b.weight > a.weight ? b : a));
   const open = (reason: VerdictReason): ClassVerdict => ({ grade: 'not-decided', geometry: null, reason, likelihoods, likelihood: best.weight });
-  const stretch = undecidedStretch(model, elements, row);
-  if (stretch && reading.jHz >= stretch[0] && reading.jHz <= stretch[1]) return open('undecided-stretch');
   if (best.weight < tableParameter(row, 'tentative')) {
     const shared = likelihoods.reduce((s, l) => s + l.weight, 0);
     return open(shared < tableParameter(row, 'tentative') ? 'neither' : 'likelihood');

@@ -3,8 +3,8 @@ import { bracketedRoot } from './bracketed';
 
 /** A function of an angle (radians) that rises or falls throughout between neighbouring `turns`. */
 export interface Periodic {
-  value(phi: number): number;
-  slope(phi: number): number;
+  value: (phi: number) => number;
+  slope: (phi: number) => number;
   /** ascending within one turn of the circle; [] = the function is constant */
   turns: readonly number[];
   /** value at each turn */
@@ -59,8 +59,26 @@ export function fromHarmonics(h: Harmonics): Periodic {
     const s = Math.sin(phi);
     return b1 * c - a1 * s + 2 * b2 * (c * c - s * s) - 4 * a2 * s * c;
   };
-  const turns = turningPoints(h);
-  return { value, slope, turns, peaks: turns.map(value), even: b1 === 0 && b2 === 0 };
+  // found when first asked for: a single value of J needs no turns
+  let found: { turns: number[]; peaks: number[] } | null = null;
+  const turning = (): { turns: number[]; peaks: number[] } => {
+    if (!found) {
+      const turns = turningPoints(h);
+      found = { turns, peaks: turns.map(value) };
+    }
+    return found;
+  };
+  return {
+    value,
+    slope,
+    even: b1 === 0 && b2 === 0,
+    get turns() {
+      return turning().turns;
+    },
+    get peaks() {
+      return turning().peaks;
+    },
+  };
 }
 
 /** The pieces between neighbouring turns, once around the circle. */

@@ -27,6 +27,10 @@ function openWords(context: DoubleContext, cls: AlkeneClassModel, descriptors: R
   const below = trans.rangeHz[0] - reading.jHz;
   const above = reading.jHz - cis.rangeHz[1];
   if (below > 0 && above > 0) return { headline: say.between(j, cls.name), detail: say.betweenDetail(below, above, descriptors) };
+  const stretch = undecidedStretch(cls, context.kind?.elements ?? [], context.model.row);
+  if (stretch && reading.jHz >= stretch[0] && reading.jHz <= stretch[1]) {
+    return { headline: say.guarded(j, cls.name), detail: say.guardedDetail(cis.rangeHz, trans.rangeHz, stretch, descriptors) };
+  }
   const outside = reading.jHz > trans.rangeHz[1] || reading.jHz < Math.min(cis.rangeHz[0], trans.rangeHz[0]);
   return { headline: outside ? say.beyond(j, cls.name) : say.close(j, cls.name), detail: ranges };
 }
@@ -85,7 +89,7 @@ export function judgeDisubstituted(context: DoubleContext, cap: boolean): Double
   const few = twoWays(cls) && Math.min(cls.distributions.cis?.count ?? 0, cls.distributions.trans?.count ?? 0) < FEW_COMPOUNDS;
   const border: CautionId | false = !diene && twoWays(cls) && ['undecided-stretch', 'near-edge', 'likelihood'].includes(judged.reason) && 'alkene-border';
   return {
-    grade, reason: diene ? 'diene' : cap && g ? 'ring-large' : judged.reason, likelihood: judged.likelihood, ...said,
+    grade, reason: diene ? 'diene' : cap && g ? 'ring-large' : judged.reason, likelihood: grade === 'not-decided' ? null : judged.likelihood, ...said,
     rulesOut: g && rival ? [say.rulesOut(other, cls.name, rival.rangeHz, otherWeight)] : closedByLimit(context, cls),
     cannotTell: [say.cannotWhich(), say.cannotAbsolute()],
     cautionIds: [border, diene && 'diene-single-bond', few && 'small-sample', kind.symmetric && 'symmetric-alkene', kind.classId === 'none' && 'out-of-domain',

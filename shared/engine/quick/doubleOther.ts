@@ -41,7 +41,7 @@ export function judgeTerminal(context: DoubleContext): DoubleVerdict {
     : reading.limit !== 'none' ? say.limit(j)
     : reading.jHz > cis.rangeHz[1] && reading.jHz < trans.rangeHz[0] ? say.between(j, cls.name) : say.close(j, cls.name);
   return {
-    ...base, finding, grade: g ? judged.grade : 'not-decided', reason: judged.reason, likelihood: judged.likelihood, headline,
+    ...base, finding, grade: g ? judged.grade : 'not-decided', reason: judged.reason, likelihood: g ? judged.likelihood : null, headline,
     detail: cis && trans ? say.rangesDetail(cis.rangeHz, trans.rangeHz, null) : say.noValuesDetail(),
     rulesOut: g ? others.map((x) => say.rulesOut(x, cls.name, cls.distributions[x]?.rangeHz ?? [0, 0], judged.likelihoods.find((l) => l.geometry === x)?.weight ?? 0)) : [],
     cautionIds: [judged.reason === 'undecided-stretch' && 'alkene-border', g === 'geminal' && 'sign-not-measured', kind.classId === 'none' && 'out-of-domain',

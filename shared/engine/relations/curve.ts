@@ -25,7 +25,7 @@ export interface Curve {
   periodic: Periodic;
   /** J(−φ) = J(φ): the halves are mirror images */
   even: boolean;
-  reach: { minHz: Hz; maxHz: Hz };
+  readonly reach: { minHz: Hz; maxHz: Hz };
 }
 
 /** @throws RangeError when the row gives no angle (a class table) */
@@ -54,8 +54,17 @@ export function bindCurve(relation: RelationRow, inputs: CurveInputs = {}): Curv
     set = only;
     periodic = row.kind === 'two-branch' ? twoBranch(set) : fromHarmonics(threeTermHarmonics(row, set));
   }
-  const [minHz, maxHz] = reachOf(periodic);
-  return { row, set, substituents, periodic, even: periodic.even, reach: { minHz, maxHz } };
+  return {
+    row,
+    set,
+    substituents,
+    periodic,
+    even: periodic.even,
+    get reach() {
+      const [minHz, maxHz] = reachOf(periodic);
+      return { minHz, maxHz };
+    },
+  };
 }
 
 /** J at φ (any finite angle in degrees). */

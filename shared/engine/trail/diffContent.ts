@@ -21,7 +21,7 @@ function shown(value: unknown): string {
   if (value === null || value === undefined) return '';
   if (typeof value === 'string') return value;
   if (Array.isArray(value) && value.every((v) => typeof v === 'string')) return value.join(', ');
-  return typeof value === 'object' ? canonicalJson(value) : String(value);
+  return canonicalJson(value);
 }
 
 const isRecord = (value: unknown): value is Record<string, unknown> => typeof value === 'object' && value !== null && !Array.isArray(value);

@@ -19,6 +19,9 @@ export const doubleText = {
   notGivenOpen: (j: string) => `${j} does not tell cis from trans without the groups`,
   between: (j: string, className: string) => `${j} lies between the cis and the trans values known with ${className}`,
   close: (j: string, className: string) => `${j} lies where cis and trans values come close with ${className}`,
+  guarded: (j: string, className: string) => `${j} lies in a stretch that is left open with ${className}`,
+  guardedDetail: (cis: [Hz, Hz], trans: [Hz, Hz], open: [Hz, Hz], d: EZ) =>
+    `Held there: cis ${hzRange(...cis)}, trans ${hzRange(...trans)}; from ${hzRange(...open)} nothing is decided, because the groups move both.${ez(d)}`,
   beyond: (j: string, className: string) => `${j} lies outside the values known with ${className}`,
   noValues: (j: string, elements: string) => `No values are held for ${elements} on the bond: ${j} is not judged`,
   noValuesDetail: () => `A band from other groups would mislead here.`,

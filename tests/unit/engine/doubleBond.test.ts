@@ -70,9 +70,12 @@ describe('a class without values', () => {
 describe('likelihoods', () => {
   it('stay below 1 together and follow J', () => {
     fc.assert(fc.property(fc.double({ min: 0.4, max: 30, noNaN: true }), fc.constantFrom('C', 'O', 'Cl', 'S', 'F', 'Si', 'N'), (j, element) => {
-      const sum = answer(String(j), element).double?.likelihoods.reduce((s, l) => s + l.weight, 0) ?? 0;
-      expect(sum).toBeGreaterThan(0);
-      expect(sum).toBeLessThan(1);
+      const a = answer(String(j), element);
+      const list = a.double?.likelihoods ?? [];
+      const sum = list.reduce((s, l) => s + l.weight, 0);
+      // inside the stretch that decides nothing no odds are given: they would name the nearer side after all
+      if (list.length === 0) expect(a.grade).toBe('not-decided');
+      else expect(sum > 0 && sum < 1).toBe(true);
     }));
   });
   it('carry the grade: assigned from 0.95, tentative from 0.80', () => {
