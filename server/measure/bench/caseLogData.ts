@@ -20,8 +20,11 @@ const run = promisify(execFile);
 
 export const LOG_EMAIL = 'bench@team.example';
 export const LOG_PASSWORD = 'bench-of-the-log';
-/** stands in every third case, so that both logs fill a page of hits */
-export const SEARCHED = 'amide';
+/** stands in the first 30 cases of either log: the answer has the same size, so that the size of the log is what differs */
+export const SEARCHED = 'palladium';
+const WITH_SEARCHED = 30;
+/** stands in every third case: 34 hits in the small log, 3,334 in the large one, all of which are counted */
+export const COMMON_WORD = 'amide';
 
 const BATCH = 500;
 
@@ -76,6 +79,8 @@ export async function fillLog(ownerUrl: string, count: number): Promise<void> {
         written.map(({ id, contentText, trailText, hash, engine, at }) => [id, contentText, trailText, hash, engine, userId, 'Bench', at]));
       await connection.batch('INSERT INTO case_tags (case_id, project_id, tag) VALUES (?, ?, ?)', written.flatMap(({ id, tags }) => tags.map((tag) => [id, projectId, tag])));
     }
+    // a log that grew over years has statistics; one that was written in a minute has none yet
+    await connection.query('ANALYZE TABLE cases, case_tags, case_counts');
   } finally {
     await connection.end();
   }
@@ -90,7 +95,7 @@ function caseOf(index: number): CaseContent {
   const decided = Number(jHz) >= 14.5;
   return content({
     question: `${one(['Styryl', 'Crotyl', 'Cinnamyl', 'Dienyl'])} ${kind} ${index + 1}: E or Z?`,
-    compound: { name: `${one(['N-benzyl', 'N-isobutyl', '4-fluoro', '2-methoxy'])}-${one(['phenyl', 'pyridyl', 'thienyl', 'naphthyl'])}propenoic ${kind} ${index + 1}`, batch: `B-${1000 + index}`, notebook: `NB-${Math.floor(index / 20)}-${index % 20}`, structureNote: '' },
+    compound: { name: `${one(['N-benzyl', 'N-isobutyl', '4-fluoro', '2-methoxy'])}-${one(['phenyl', 'pyridyl', 'thienyl', 'naphthyl'])}propenoic ${kind} ${index + 1}`, batch: `B-${1000 + index}`, notebook: `NB-${Math.floor(index / 20)}-${index % 20}`, structureNote: index < WITH_SEARCHED ? 'Made with palladium on carbon.' : 'Made without a metal.' },
     conditions: conditions('500.13', one(['CDCl3', 'DMSO-d6', 'CD3OD'])),
     readings: [reading('r1', ['H-2', 'H-3'], jHz, { partner: jHz })],
     calculations: [doubleBond('c1', 'r1', { left: [G.aryl, G.h], right: [G.amide, G.h] })],
