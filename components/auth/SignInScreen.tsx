@@ -70,5 +70,5 @@ export function SignInScreen() {
 
 const styles = StyleSheet.create({
   password: { gap: 0 },
-  forgotten: { alignItems: 'flex-end', marginBottom: -space.md },
+  forgotten: { flexDirection: 'row', justifyContent: 'flex-end', marginBottom: -space.md },
 });

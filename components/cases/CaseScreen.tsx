@@ -36,9 +36,11 @@ export function CaseScreen({ caseId }: { caseId: string }) {
 
 function OpenCase({ found, reader, isSignedIn, isOutdated, refetch }: { found: CaseResponse; reader: User; isSignedIn: boolean; isOutdated: boolean; refetch: () => void }) {
   const { mutateAsync } = useSaveCase(found.id);
-  const editor = useCaseEditor({ found, reader: reader.id, isSignedIn, mayEdit: found.may.edit, save: mutateAsync, refetch });
+  // whoever reviews does not write: a saved change would take the case out of their hands
+  const mayEdit = found.may.edit && found.review.reviewer?.id !== reader.id;
+  const editor = useCaseEditor({ found, reader: reader.id, isSignedIn, mayEdit, save: mutateAsync, refetch });
   const [sheet, setSheet] = useState<CaseSheet | null>(null);
-  const view: CaseView = { found, content: editor.content, editor, mayEdit: found.may.edit, reader, now: new Date(), open: setSheet };
+  const view: CaseView = { found, content: editor.content, editor, mayEdit, reader, now: new Date(), open: setSheet };
   return (
     <CaseContext value={view}>
       {editor.state.status === 'conflict' ? <VersionsView /> : <CaseLayout isOutdated={isOutdated} />}

@@ -41,12 +41,12 @@ export function ReviewCard() {
         {inReview && !may.claim && !mine && may.why['claim'] !== undefined && <Text kind="small" tone="muted">{may.why['claim']}</Text>}
       </View>
       {review.submittedAt !== null && review.checks.map((check) => <Check key={check.step} step={check.step} />)}
-      <View style={[styles.body, styles.below]}>
+      {review.submittedAt !== null && <View style={[styles.body, styles.below]}>
         <Threads steps={steps} />
         {may.query && <Button label={say.newQuery} opens="dialog" onPress={() => open({ kind: 'query', stepKey: null })} />}
         {mine && inReview && <Button kind="primary" label={say.sign} opens="dialog" onPress={() => open({ kind: 'sign' })} disabledBecause={reasonToSign} />}
         {may.release && <Button kind="quiet" label={say.release} busy={release.isPending && say.releasing} onPress={() => release.mutate()} />}
-      </View>
+      </View>}
       {signatures.length > 0 && (
         <View style={styles.signatures}>
           <Text kind="strong">{say.signatures}</Text>
@@ -88,10 +88,11 @@ function Check({ step }: { step: ReviewStep }) {
       </View>
       {query !== undefined
         ? <View style={styles.state}><CautionIcon size={14} /><Text kind="denseStrong" tone="caution" noWrap>{say.queryNumber(query.number)}</Text></View>
-        : isChecked ? <View style={styles.state}><Icon name="check" size={14} /><Text kind="denseStrong" noWrap>{say.checked}</Text></View>
-        : !found.may.check && <Text kind="denseStrong" tone="muted" noWrap>{say.open}</Text>}
+        : !found.may.check && (isChecked
+          ? <View style={styles.state}><Icon name="check" size={14} /><Text kind="denseStrong" noWrap>{say.checked}</Text></View>
+          : <Text kind="denseStrong" tone="muted" noWrap>{say.open}</Text>)}
       {found.may.check && query === undefined && (
-        <Button small kind={isChecked ? 'quiet' : 'plain'} label={isChecked ? say.uncheckShort : say.check} about={stepWords[step]}
+        <Button small label={isChecked ? say.checked : say.check} about={stepWords[step]} pressed={isChecked} icon={isChecked ? <Icon name="check" size={14} tone="onInk" /> : undefined}
           busy={check.isPending && uiCaseParts.comments.busy} onPress={() => check.mutate({ step, checked: !isChecked, revision: found.revision })} />
       )}
     </View>

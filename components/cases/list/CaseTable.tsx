@@ -2,6 +2,7 @@ import type { ReactNode } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import type { CaseRow } from '@/shared/contracts/cases';
+import { shortName } from '@/shared/format/shortName';
 import { ago, dayWords } from '@/shared/format/when';
 import { uiCases } from '@/shared/text/uiCases';
 
@@ -47,7 +48,7 @@ export function CaseTable({ rows, onDevice, total, older, filter, change }: {
         },
         { key: 'answer', head: say.head.answer, wraps: true, cell: (row) => <View style={styles.answer}><AnswerLine answer={answerWords(row)} under /></View> },
         { key: 'state', head: say.head.state, cell: (row) => <StateTag state={row.state} /> },
-        { key: 'author', head: say.head.author, cell: (row) => <Text kind="dense">{row.author.name}</Text> },
+        { key: 'author', head: say.head.author, cell: (row) => <Text kind="dense" noWrap>{shortName(row.author.name)}</Text> },
         {
           key: 'due', head: say.head.due, cell: (row) => row.dueOn === null || !isOpen(row.state) ? <Text kind="dense" tone="muted">–</Text>
             : <Text kind={dueTone(row, now) === 'caution' ? 'denseStrong' : 'dense'} tone={dueTone(row, now) === 'caution' ? 'caution' : 'ink'} noWrap>{dayWords(row.dueOn, now)}</Text>,
@@ -66,8 +67,8 @@ export function CaseTable({ rows, onDevice, total, older, filter, change }: {
 
 const styles = StyleSheet.create({
   code: { minHeight: size.touchDense, justifyContent: 'center' },
-  question: { minHeight: size.touchDense, justifyContent: 'center', minWidth: 180 },
-  answer: { minWidth: 120, maxWidth: 260 },
+  question: { minHeight: size.touchDense, justifyContent: 'center', minWidth: 160, maxWidth: 264 },
+  answer: { minWidth: 110, maxWidth: 184 },
   foot: { flexDirection: 'row', alignItems: 'center', gap: space.md, minHeight: size.row, paddingHorizontal: space.lg, paddingVertical: space.xs, borderTopWidth: border.hair, borderTopColor: color.ruleSoft },
   spring: { flex: 1 },
 });

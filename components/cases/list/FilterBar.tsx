@@ -47,7 +47,7 @@ export function FilterBar({ filter, choices, change }: { filter: CaseFilter; cho
   return (
     <View style={[styles.bar, isWide && styles.wide]}>
       <View style={isWide ? styles.searchWide : undefined}><Search value={filter.q ?? ''} onChange={(q) => change({ q: q === '' ? undefined : q })} /></View>
-      <View role="group" aria-label={say.filters} style={styles.chips}>
+      <View role="group" aria-label={say.filters} style={[styles.chips, isWide && styles.chipsWide]}>
         {(['project', 'state', 'grade', 'person', 'tag'] as const).map(chip)}
         {isFiltered(filter) && <Button small kind="quiet" label={say.clear} onPress={() => change({ q: undefined, project: undefined, state: undefined, grade: undefined, person: undefined, tag: undefined })} />}
       </View>
@@ -88,5 +88,6 @@ const styles = StyleSheet.create({
   wide: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'flex-end' },
   searchWide: { width: 320 },
   chips: { flexDirection: 'row', flexWrap: 'wrap', gap: space.sm, alignItems: 'center', flexShrink: 1 },
+  chipsWide: { paddingBottom: space.sm },
   none: { padding: space.lg },
 });

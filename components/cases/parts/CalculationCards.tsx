@@ -8,10 +8,12 @@ import type { Calculation, Reading } from '@/shared/types/case';
 
 import { LazyAnswerPlots } from '../../plots/LazyPlots';
 import { space } from '../../theme/tokens';
+import { useLayout } from '../../theme/useLayout';
 import { GradeWord } from '../../ui/AnswerStrip';
 import { Button } from '../../ui/Button';
 import { Card, CardBody } from '../../ui/Card';
 import { Disclosure } from '../../ui/Disclosure';
+import { CautionIcon } from '../../ui/Glyph';
 import { Heading } from '../../ui/Heading';
 import { Mark } from '../../ui/Mark';
 import { Notice } from '../../ui/Notice';
@@ -22,12 +24,11 @@ import { applyMend } from '../logic/mends';
 import { same } from '../logic/versions';
 
 const say = uiCaseParts.calculation;
-/** Plots stand open while there are few; more are opened one by one. */
-const OPEN_UP_TO = 2;
 
 /** What a relation makes of each reading: the finding in words, then curve and dial or the ladder, each with its table. */
 export function CalculationCards() {
   const { content, mayEdit } = useCaseView();
+  const { isWide } = useLayout();
   if (content.calculations.length === 0) {
     const vicinal = content.readings.filter((reading) => reading.path === '3J');
     return (
@@ -37,7 +38,7 @@ export function CalculationCards() {
       </Card>
     );
   }
-  return content.calculations.map((calculation, at) => <CalculationCard key={calculation.id} calculation={calculation} startOpen={content.calculations.length <= OPEN_UP_TO || at === 0} />);
+  return content.calculations.map((calculation, at) => <CalculationCard key={calculation.id} calculation={calculation} startOpen={at === 0 && (isWide || content.calculations.length === 1)} />);
 }
 
 function AddButton({ reading }: { reading: Reading }) {
@@ -87,7 +88,9 @@ function Finding({ answer }: { answer: QuickLookAnswer }) {
       <RichText text={answer.detail} />
       {answer.notes.filter((note) => note.code !== 'default-error').map((note) => <RichText key={`${note.field}${note.code}`} kind="small" tone="muted" text={note.text} />)}
       {answer.rulesOut.map((line) => <RichText key={line} kind="dense" text={line} />)}
-      {answer.cautions.map((caution) => <Notice key={caution.id} text={caution.text} />)}
+      {answer.cautions.map((caution) => (
+        <View key={caution.id} style={styles.caution}><View style={styles.icon}><CautionIcon size={14} /></View><View style={styles.words}><RichText kind="small" text={caution.text} /></View></View>
+      ))}
     </View>
   );
 }
@@ -97,4 +100,7 @@ const styles = StyleSheet.create({
   acts: { flexDirection: 'row' },
   finding: { gap: space.xs },
   plots: { padding: space.sm },
+  caution: { flexDirection: 'row', gap: space.sm },
+  icon: { paddingTop: 3 },
+  words: { flex: 1, minWidth: 0 },
 });

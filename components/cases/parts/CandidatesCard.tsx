@@ -75,7 +75,7 @@ function Row({ candidate, finding, isChosen }: { candidate: Candidate; finding: 
         <RichText kind="small" tone="muted" text={[...new Set(candidate.claims.map((claim) => claim.calculationId))].map((id) =>
           `${nameOf(id)}: ${candidate.claims.filter((claim) => claim.calculationId === id).map(claimWords).join(' or ')}`).join(' · ')} />
       )}
-      {finding?.verdicts.filter((verdict) => verdict.why !== '').map((verdict) => <RichText key={verdict.calculationId} kind="dense" text={verdict.why} />)}
+      {finding?.verdicts.filter((verdict) => verdict.why !== '' && (verdict.verdict !== 'not-tested' || status === 'not-tested')).filter((verdict, at, all) => all.findIndex((each) => each.why === verdict.why) === at).map((verdict) => <RichText key={verdict.calculationId} kind="dense" text={verdict.why} />)}
     </View>
   );
 }
