@@ -41,6 +41,10 @@ export default tseslint.config(
           name: 'react-native',
           importNames: ['FlatList', 'SectionList', 'VirtualizedList', 'Button', 'CheckBox', 'Picker', 'ProgressBar', 'ImageBackground', 'YellowBox', 'TouchableHighlight', 'TouchableNativeFeedback', 'TouchableOpacity', 'TouchableWithoutFeedback'],
           message: 'Left out of the web bundle for its size, see assets/bundle/nativeUnused.js.',
+        }, {
+          name: 'expo-router',
+          importNames: ['Stack', 'Tabs', 'ExperimentalStack'],
+          message: 'Left out of the web bundle for its size, see assets/bundle/routerUnused.js.',
         }],
         patterns: [{ regex: '^(@/|\\.\\./+)server/', message: 'The client meets the server through shared/contracts only.' }],
       }],

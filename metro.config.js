@@ -1,6 +1,6 @@
 // Metro bundles the web client. Three things differ from Expo's defaults: folders that never belong to the
-// client are out of its sight, parts of zod and react-native-web that it never needs are replaced by
-// small stand-ins, and in development /api goes to the server, so that cookies stay same-origin.
+// client are out of its sight, parts of zod, react-native-web and expo-router that it never needs are
+// replaced by small stand-ins, and in development /api goes to the server, so that cookies stay same-origin.
 const { createHash } = require('node:crypto');
 const { readFileSync } = require('node:fs');
 const http = require('node:http');
@@ -23,6 +23,10 @@ const inPackage = (folder, files, by) => files.map((file) => [path.join(root, 'n
 const replaced = new Map([
   ...inPackage('zod/v4', ['locales/index.js'], 'zodLocales.js'),
   ...inPackage('zod/v4', ['core/compile.js', 'core/to-json-schema.js', 'core/json-schema-processors.js', 'core/json-schema-generator.js', 'classic/from-json-schema.js'], 'zodUnused.js'),
+  ...inPackage('expo-router/build', [
+    'stack/index.js', 'layouts/Tabs.js', 'layouts/experimental-stack/index.js', 'fork/native-stack/createNativeStackNavigator.js',
+    'react-navigation/bottom-tabs/index.js',
+  ], 'routerUnused.js'),
   ...inPackage('react-native-web/dist/exports', [
     'FlatList', 'SectionList', 'VirtualizedList', 'Button', 'CheckBox', 'Picker', 'ProgressBar', 'ImageBackground', 'YellowBox',
     'TouchableHighlight', 'TouchableNativeFeedback', 'TouchableOpacity', 'TouchableWithoutFeedback',
