@@ -1,9 +1,10 @@
 import fc from 'fast-check';
 
-import { quickLook } from '@/shared/engine';
+import { quickLook, registryFrom, type Registry } from '@/shared/engine';
 import { studentDensity } from '@/shared/engine/math/student';
 import { plainText } from '@/shared/format/richText';
 import type { DoubleBondInput, QuickLookAnswer } from '@/shared/types/answer';
+import type { AlkeneCompound } from '@/shared/types/relation';
 import { heldForTests } from '../../helpers/registry';
 
 const registry = heldForTests();
@@ -43,6 +44,25 @@ describe('the stretches that decide nothing', () => {
   // 1,2-dichloroethene (coupling tables of H. J. Reich, NMR course notes)
   it.each([['12.8', 'Sn', 'C', 'trans'], ['14.75', 'Si', 'C', 'trans'], ['9.5', 'F', 'F', 'cis'], ['12.1', 'Cl', 'Cl', 'cis'], ['12.8', 'I', 'C', 'trans'], ['19.0', 'Li', 'C', 'trans']])('never calls %s Hz beside %s, %s %s', (j, left, right, wrong) => {
     expect(answer(j, left, right).double?.geometry).not.toBe(wrong);
+  });
+});
+
+describe('what caps a grade at tentative', () => {
+  const changed = (change: (c: AlkeneCompound) => AlkeneCompound | null) => registryFrom(registry.rows.map((row) =>
+    (row.kind === 'class-table' ? { ...row, compounds: row.compounds.flatMap((c) => change(c) ?? []) } : row)));
+  const cinnamate = (held: Registry) => quickLook({ bond: 'double', j: '15.8', groups: { left: ['H', 'C(=O,O)'], right: ['H', 'C(=C,C)'] } }, held);
+  it('a value of the class from memory', () => {
+    expect(cinnamate(registry)).toMatchObject({ grade: 'assigned' });
+    const recalled = cinnamate(changed((c) => (c.name === 'but-2-ene' ? { ...c, provenance: 'memory' } : c)));
+    expect(recalled).toMatchObject({ grade: 'tentative', double: { geometry: 'trans' } });
+    expect(recalled.state === 'answered' && recalled.cautions.map((c) => c.id)).toContain('from-memory');
+  });
+  it('a class that holds one compound each way', () => {
+    expect(cinnamate(changed((c) => (c.name === 'methyl but-2-enoate' ? null : c)))).toMatchObject({ grade: 'tentative' });
+  });
+  it('a vinyl group at about 10 Hz leaves it open, because the single bond gives the same', () => {
+    expect(said(answer('10.4', 'C(=C,H)', 'C(H,H,H)'))).toBe('not-decided none');
+    expect(said(answer('15.3', 'C(=C,H)', 'C(H,H,H)'))).toBe('assigned trans');
   });
 });
 
