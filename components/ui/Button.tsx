@@ -53,7 +53,7 @@ export function Button({
         ref={buttonRef}
         role="button"
         aria-label={spoken === undefined ? undefined : plainText(spoken)}
-        aria-disabled={off || undefined}
+        disabled={disabledBecause !== undefined}
         aria-busy={isBusy || undefined}
         onPress={off ? undefined : onPress}
         {...web({

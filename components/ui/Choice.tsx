@@ -28,7 +28,7 @@ export function RadioRows({ label, children }: { label: string; children: ReactN
 function Row({ label, detail, aside, onPress, disabledBecause, role, checked, box }: RowProps & { role: 'checkbox' | 'radio'; checked: boolean; box: ReactNode }) {
   const off = disabledBecause !== undefined;
   return (
-    <Pressable role={role} aria-disabled={off || undefined} onPress={off ? undefined : onPress} {...web({ 'aria-checked': checked })} style={[styles.row, role === 'radio' && checked && styles.chosen]}>
+    <Pressable role={role} disabled={off} onPress={off ? undefined : onPress} {...web({ 'aria-checked': checked })} style={[styles.row, role === 'radio' && checked && styles.chosen]}>
       {box}
       <View style={styles.words}>
         <Text kind="strong" tone={off ? 'muted' : 'ink'}><RichInline text={label} /></Text>
