@@ -20,11 +20,11 @@ export const attachmentRoutes = (deps: CaseDeps, blobs: Blobs): Route[] => {
   const service = attachmentService(deps, blobs);
   return [
     route({ method: 'post', path: '/api/cases/:caseId/attachments', access: 'person', summary: 'Attach a file: its bytes as the body, its name in X-File-Name', uploadBytes: LIMITS.attachmentBytes, response: attachmentResponse, status: 201 },
-      ({ who, params, body, req }) => service.add(who, params.caseId!, fileNameFrom(req.get('X-File-Name')), Buffer.isBuffer(body) ? body : Buffer.alloc(0))),
+      ({ who, params, body, req }) => service.add(who, params.caseId, fileNameFrom(req.get('X-File-Name')), Buffer.isBuffer(body) ? body : Buffer.alloc(0))),
 
     route({ method: 'get', path: '/api/attachments/:attachmentId', access: 'person', summary: 'The bytes of a file as they came', response: { file: 'application/octet-stream' } },
       async ({ who, params, res }) => {
-        const found = await service.find(who, params.attachmentId!);
+        const found = await service.find(who, params.attachmentId);
         const stream = await blobs.open(found.sha256, found.bytes);
         if (!stream) throw new Problem('gone', casesText.attachment.missing);
         res.set(downloadHeaders(found.mediaType, found.fileName, found.bytes));

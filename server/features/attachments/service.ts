@@ -24,7 +24,6 @@ export function fileNameFrom(header: string | undefined): string {
   } catch {
     // not percent-encoded: refused below like a missing name
   }
-  // eslint-disable-next-line no-control-regex -- these have no place in a name
   const plain = name.normalize('NFC').replace(/[\u0000-\u001f\u007f\u2028\u2029\u202a-\u202e\u2066-\u2069]/g, '').split(/[\\/]/).pop()?.trim() ?? '';
   if (plain === '' || plain === '.' || plain === '..' || [...plain].length > LIMITS.fileName) throw new Problem('invalid-input', words.name, { errors: [{ pointer: '#/X-File-Name', detail: words.name }] });
   return plain;

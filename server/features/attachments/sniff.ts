@@ -23,7 +23,6 @@ const KEPT = new Set([
 const PROGRAMS = ['7f454c46', '4d5a', 'feedface', 'feedfacf', 'cefaedfe', 'cffaedfe', 'cafebabe', '0061736d'];
 
 /** Characters that a text file does not hold: control characters other than tab, line ends, form feed and escape-free extras. */
-// eslint-disable-next-line no-control-regex -- this is what is looked for
 const CONTROL = /[\u0000-\u0008\u000b\u000e-\u001f]/;
 
 function asText(bytes: Buffer): string | null {

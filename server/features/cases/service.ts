@@ -58,7 +58,7 @@ async function insertCase(deps: CaseDeps, who: Actor, projectId: string, content
   files: { id: string; sha256: string }[] = []): Promise<CaseModel> {
   const { number, key } = await takeNumber(projectId, tx);
   const at = deps.now();
-  const made = await makeRevision(deps, content, files);
+  const made = makeRevision(deps, content, files);
   const { code, codeOrder } = codeOf(key, number);
   const found = await CaseModel.create({
     id: deps.newId(), projectId, number, code, codeOrder, authorId: who.id, state: 'draft', version: 1, revision: 1, contentHash: made.hash,
@@ -96,7 +96,7 @@ export const caseService = (deps: CaseDeps) => ({
       const content = normalised(request.content, before);
       const files = await filesOf(caseId, tx);
       checkReferences(content, new Set(files.map(({ id }) => id)));
-      const made = await makeRevision(deps, content, files);
+      const made = makeRevision(deps, content, files);
       if (made.hash === found.contentHash) return;
       const reason = request.reason?.trim() ?? '';
       if (found.firstSubmittedRevision !== null && reason === '') throw fieldProblem('reason', casesText.reasonNeeded);

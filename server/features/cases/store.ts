@@ -84,13 +84,13 @@ export const filesOf = (caseId: string, tx: Transaction | null = null) =>
   AttachmentModel.findAll({ where: { caseId }, attributes: ['id', 'sha256'], transaction: tx, raw: true });
 
 /** What a save stores: both texts, and the hash over them and over the files that the evidence cites. */
-export async function makeRevision(deps: Pick<CaseDeps, 'trailOf'>, content: CaseContent, files: { id: string; sha256: string }[]) {
+export function makeRevision(deps: Pick<CaseDeps, 'trailOf'>, content: CaseContent, files: { id: string; sha256: string }[]) {
   const cited = new Set(content.evidence.flatMap(({ attachmentIds }) => attachmentIds));
   const trail = deps.trailOf(content);
   const texts = { content: canonicalJson(content), trail: canonicalJson(trail) };
   return { ...texts, trailValue: trail, hash: contentHash(texts.content, texts.trail, files.filter(({ id }) => cited.has(id))) };
 }
-export type MadeRevision = Awaited<ReturnType<typeof makeRevision>>;
+export type MadeRevision = ReturnType<typeof makeRevision>;
 
 /** Is the stored revision still what its hash says? Content, trail and cited files are hashed again. */
 export async function hashHolds(revision: CaseRevisionModel, tx: Transaction | null = null): Promise<boolean> {

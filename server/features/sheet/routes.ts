@@ -31,7 +31,7 @@ const sheetQuery = z.strictObject({
 export const sheetRoutes = (deps: CaseDeps, reads: CaseReads, registry: Registry, root: string): Route[] => [
   route({ method: 'get', path: '/api/cases/:caseId/sheet.pdf', access: 'person', summary: 'The summary sheet of a revision as a PDF', query: sheetQuery, response: { file: 'application/pdf' } },
     async ({ who, params, query, res }) => {
-      const input = await readSheet(deps, reads, registry, who, params.caseId!, query.revision ?? null, query.zone ?? 'UTC');
+      const input = await readSheet(deps, reads, registry, who, params.caseId, query.revision ?? null, query.zone ?? 'UTC');
       const model = sheetModel(input);
       const bytes = await renderSheet(model, query.paper ?? 'A4', root);
       const name = `${model.code}-r${model.revision}${model.mark ? '-draft' : ''}.pdf`;
@@ -40,5 +40,5 @@ export const sheetRoutes = (deps: CaseDeps, reads: CaseReads, registry: Registry
     }),
 
   route({ method: 'get', path: '/api/cases/:caseId/si-text', access: 'person', summary: 'The readings as a line for the supporting information', response: siTextResponse },
-    async ({ who, params }) => ({ text: siText(contentOf(await presentRevision(await findCase(who, params.caseId!)))) })),
+    async ({ who, params }) => ({ text: siText(contentOf(await presentRevision(await findCase(who, params.caseId)))) })),
 ];

@@ -1,4 +1,5 @@
 import type { CaseResponse } from '@/shared/contracts/cases';
+import type { ProblemBody } from '@/shared/contracts/problem';
 import { cinnamate } from '@/tests/helpers/caseContent';
 import { checkAll, claim, draft, ok, sign, signedCase, submit } from '@/tests/helpers/caseWork';
 import { testServer, PASSWORD, type Client, type TestPerson, type TestServer } from '@/tests/helpers/server';
@@ -71,8 +72,8 @@ describe('a signature is refused', () => {
 
   it('to a role that does not review, and to somebody who does not hold the case', async () => {
     const one = await ready();
-    expect((await sign(as.petra, one)).body.detail).toBe('Reviewers and leads of the project review cases.');
-    expect((await sign(as.ilse, one)).body.type).toBe('/problems/held-by-another');
+    expect((await sign<ProblemBody>(as.petra, one)).body.detail).toBe('Reviewers and leads of the project review cases.');
+    expect((await sign<ProblemBody>(as.ilse, one)).body.type).toBe('/problems/held-by-another');
     expect(await stateOf(one.id)).toBe('in-review');
   });
 
