@@ -48,7 +48,7 @@ async function tests() {
     });
     if (!existsSync(outputFile)) return count('Tests (jest)', `jest ended with exit code ${code} before it could count.`);
     const results = JSON.parse(readFileSync(outputFile, 'utf8'));
-    const counted = countResults(results);
+    const counted = countResults(results, { someOnly: only.length > 0 });
     passed += counted.passed;
     failed += counted.failed;
     if (code !== 0 && counted.failed === 0) count('Tests (jest)', `jest ended with exit code ${code} although no test failed.`);

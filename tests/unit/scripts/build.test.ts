@@ -66,5 +66,6 @@ describe('the count of tests', () => {
     const file = (status: string, ...tests: string[]) => ({ status, assertionResults: tests.map((result) => ({ status: result })) });
     const testResults = [file('passed', 'passed', 'passed'), file('failed', 'passed', 'failed'), file('failed'), file('passed', 'pending')];
     expect(countResults({ numPassedTests: 3, numFailedTests: 1, numPendingTests: 1, numTodoTests: 0, testResults })).toEqual({ passed: 3, failed: 3 });
+    expect(countResults({ numPassedTests: 3, numFailedTests: 1, numPendingTests: 1, numTodoTests: 0, testResults }, { someOnly: true }).failed).toBe(2);
   });
 });
