@@ -26,7 +26,7 @@ export function GroupsCard({ form, set, say, relation, open, onOpen }: {
 }) {
   const given = countGiven(form.front, form.rear);
   const value = isWhole(form.front, form.rear)
-    ? `${quickText.front} ${form.front.map(firstAtom).join(', ')}\u2002·\u2002${quickText.rear} ${form.rear.map(firstAtom).join(', ')}`
+    ? `${quickText.front} ${form.front.map(firstAtom).join(', ')}\u2007·\u2007${quickText.rear} ${form.rear.map(firstAtom).join(', ')}`
     : given === 0 ? quickText.notGiven : quickText.partGiven(given);
   const trouble = ['groups', 'groups.front', 'groups.rear', 'relation', 'turning'].map(say).find((entry) => entry.error !== undefined)?.error;
   const close = () => onOpen(null);
