@@ -80,11 +80,15 @@ export async function visitEveryPart(page: Page): Promise<void> {
   await page.locator(DIAL).first().waitFor();
   await page.locator(CURVE).first().waitFor();
   await openAndClose(page, quickText.groups);
-  await openAndClose(page, quickText.relation);
+  await openAndClose(page, quickText.relationBy);
   await page.getByRole('radio', { name: quickText.bonds.double }).click();
   await typeReading(page, '15.8');
   await page.locator(`[aria-label^="${startOf(quickText.ladderLabel('§', ''))}"]`).first().waitFor();
-  await openAndClose(page, quickText.smiles);
+  await page.getByRole('button', { name: quickText.smiles }).click();
+  await page.getByLabel(quickText.smilesLabel).fill('CC=CC(=O)OC');
+  await page.getByRole('button', { name: quickText.smilesRead }).click();
+  await page.waitForLoadState('networkidle');
+  await page.keyboard.press('Escape');
   await page.getByRole('radio', { name: quickText.bonds.single }).click();
 }
 
