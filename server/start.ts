@@ -74,21 +74,25 @@ export interface Running {
 /** Starts the whole product; `stop` lets answers under way finish for half a second, then ends. */
 export async function serve(env: Env, log: Log, passwords: Passwords): Promise<Running> {
   const deps = makeDeps(env, log, passwords);
-  await checkSchema(deps);
-  const built = existsSync(path.join(env.distDir, 'index.html'));
-  if (!built) log.info('client-not-built');
-  const server = createServer(createApp(deps, { distDir: built ? env.distDir : null }));
-  const port = await listen(server, env.port);
-  log.info('listening', { port });
-  return {
-    port,
-    stop: async () => {
-      const closed = new Promise<void>((resolve) => server.close(() => resolve()));
-      server.closeIdleConnections();
-      const cut = setTimeout(() => server.closeAllConnections(), 500);
-      await closed;
-      clearTimeout(cut);
-      await stopDeps(deps);
-    },
-  };
+  try {
+    await checkSchema(deps);
+    const built = existsSync(path.join(env.distDir, 'index.html'));
+    if (!built) log.info('client-not-built');
+    const server = createServer(createApp(deps, { distDir: built ? env.distDir : null }));
+    const port = await listen(server, env.port);
+    log.info('listening', { port });
+    return { port, stop: () => stopServing(server, deps) };
+  } catch (error) {
+    await stopDeps(deps); // an open pool would keep a failed start alive
+    throw error;
+  }
+}
+
+async function stopServing(server: Server, deps: Deps): Promise<void> {
+  const closed = new Promise<void>((resolve) => server.close(() => resolve()));
+  server.closeIdleConnections();
+  const cut = setTimeout(() => server.closeAllConnections(), 500);
+  await closed;
+  clearTimeout(cut);
+  await stopDeps(deps);
 }

@@ -159,7 +159,8 @@ function run(one: Route, checkTrusted: boolean) {
     });
     if (!answerSchema || response.headersSent) return; // a file wrote itself
     const body = check ? answerSchema.parse(answer) : answer;
-    response.status(one.status).type('application/json').send(JSON.stringify(body));
+    if (response.statusCode === 200) response.status(one.status); // unless the handler knew better
+    response.type('application/json').send(JSON.stringify(body));
   };
 }
 
