@@ -14,6 +14,7 @@ import { relationRegistry } from '@/server/relations/registry';
 import { canonicalJson, caseTrail } from '@/shared/engine';
 import type { CaseContent } from '@/shared/types/case';
 
+import { setting } from '../lib/productServer';
 import { drawFrom } from '../lib/draw';
 
 const run = promisify(execFile);
@@ -30,18 +31,18 @@ const BATCH = 500;
 
 /** A migrated schema beside the one that the wrapper script made, with the same two users. */
 export async function makeSchema(name: string, root: string): Promise<{ appUrl: string; ownerUrl: string }> {
-  const at = (url: string | undefined): string => {
-    const moved = new URL(url ?? '');
+  const at = (url: string): string => {
+    const moved = new URL(url);
     moved.pathname = `/${name}`;
     return moved.toString();
   };
-  const connection = await createConnection(process.env.DATABASE_OWNER_URL ?? '');
+  const connection = await createConnection(setting('DATABASE_OWNER_URL'));
   try {
     await connection.query(`CREATE DATABASE \`${name}\` CHARACTER SET utf8mb4 COLLATE utf8mb4_unicode_520_ci`);
   } finally {
     await connection.end();
   }
-  const urls = { appUrl: at(process.env.DATABASE_URL), ownerUrl: at(process.env.DATABASE_OWNER_URL) };
+  const urls = { appUrl: at(setting('DATABASE_URL')), ownerUrl: at(setting('DATABASE_OWNER_URL')) };
   await run(process.execPath, [path.join(root, 'build', 'server.mjs'), 'migrate'], { cwd: root, env: { ...process.env, DATABASE_URL: urls.appUrl, DATABASE_OWNER_URL: urls.ownerUrl } });
   return urls;
 }

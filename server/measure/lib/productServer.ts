@@ -15,12 +15,15 @@ export interface RunningServer {
   stop(): Promise<void>;
 }
 
+/** A setting that the wrapper script hands over. */
+export function setting(name: 'PROJECT_ROOT' | 'DATABASE_URL' | 'DATABASE_OWNER_URL'): string {
+  const value = (process.env as Record<string, string | undefined>)[name];
+  if (value === undefined || value === '') throw new Refusal(`${name} is missing: run this through npm run check, score or bench.`);
+  return value;
+}
+
 /** The checkout that the wrapper script started us from. */
-export const projectRoot = (): string => {
-  const root = (process.env as Record<string, string | undefined>).PROJECT_ROOT;
-  if (root === undefined || root === '') throw new Refusal('PROJECT_ROOT is missing: run this through npm run check, score or bench.');
-  return root;
-};
+export const projectRoot = (): string => setting('PROJECT_ROOT');
 
 /** A port of the loopback address that nobody listens on at this moment. */
 export function freePort(): Promise<number> {
