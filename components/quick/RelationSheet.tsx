@@ -27,7 +27,7 @@ export function RelationSheet({ front, rear, chosen, onChoose, onClose }: { fron
             const domain = isRelationRow(relation.row) ? applies(relation.row, groups) : null;
             const said = domain === null ? hz(relation.spreadHz) : singleText.domain(domain.reason, domain.elements, domain.spreadHz);
             return (
-              <RadioRow key={`${relation.id}@${relation.version}`} label={relation.name} detail={`${said} ${relation.citation}`} chosen={chosen === relation.id || chosen === `${relation.id}@${relation.version}`}
+              <RadioRow key={`${relation.id}@${relation.version}`} label={relation.name} detail={domain?.verdict === 'no' ? relation.citation : `${said} ${relation.citation}`} chosen={chosen === relation.id || chosen === `${relation.id}@${relation.version}`}
                 disabledBecause={domain?.verdict === 'no' ? said : undefined} onPress={() => onChoose(relation.id)} />
             );
           })}

@@ -24,4 +24,6 @@ export function RichInline({ text }: { text: string }) {
     ));
 }
 
-const styles = StyleSheet.create({ variable: { fontFamily: families.serif, fontStyle: 'italic' } });
+// inherited by word: in a cell of a table no Text stands around it, and the renderer would paint it black and in its own size
+const inherited: object = { color: 'inherit', fontSize: 'inherit', fontWeight: 'inherit', lineHeight: 'inherit' };
+const styles = { variable: [StyleSheet.create({ face: { fontFamily: families.serif, fontStyle: 'italic' } }).face, inherited] };
