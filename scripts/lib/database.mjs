@@ -95,6 +95,8 @@ const FAST = ['--innodb-flush-log-at-trx-commit=2', '--innodb-doublewrite=OFF', 
 
 /** Starts the server on this port and returns its process once it greets. */
 async function launch({ dataDir, account, port, runDir, init, fast }) {
+  mkdirSync(runDir, { recursive: true, mode: 0o700 }); // a cleaner of /tmp may have taken it since
+  if (account) chownSync(runDir, account.uid, account.gid);
   const initFile = path.join(runDir, 'init.sql');
   writeFileSync(initFile, init, { mode: 0o600 });
   if (account) chownSync(initFile, account.uid, account.gid);
