@@ -14,8 +14,24 @@ export function onReach(watch: Reached): () => void {
 }
 const tell = (reached: boolean) => watchers.forEach((watch) => watch(reached));
 
+/** A signal that ends with the caller's own or when the time is over; written out because phones of a few years ago have no `AbortSignal.any`. */
+function within(timeoutMs: number, outer: AbortSignal | undefined): { signal: AbortSignal; stop: () => void } {
+  const own = new AbortController();
+  const end = () => own.abort();
+  const timer = setTimeout(end, timeoutMs);
+  if (outer?.aborted) end();
+  outer?.addEventListener('abort', end);
+  return {
+    signal: own.signal,
+    stop: () => {
+      clearTimeout(timer);
+      outer?.removeEventListener('abort', end);
+    },
+  };
+}
+
 async function send(method: Method, path: string, body: BodyInit | undefined, headers: Record<string, string>, options: RequestOptions): Promise<unknown> {
-  const clock = AbortSignal.timeout(options.timeoutMs ?? TIMEOUT_MS);
+  const clock = within(options.timeoutMs ?? TIMEOUT_MS, options.signal);
   let response: Response;
   let text: string;
   try {
@@ -24,13 +40,15 @@ async function send(method: Method, path: string, body: BodyInit | undefined, he
       credentials: 'same-origin',
       headers: { accept: 'application/json', ...headers },
       body,
-      signal: options.signal ? AbortSignal.any([options.signal, clock]) : clock,
+      signal: clock.signal,
     });
     text = await response.text();
   } catch (error) {
     if (options.signal?.aborted) throw error; // given up by the caller, who asks no more
     tell(false);
-    throw clock.aborted ? timeoutProblem() : offlineProblem();
+    throw clock.signal.aborted ? timeoutProblem() : offlineProblem();
+  } finally {
+    clock.stop();
   }
   tell(true);
   let json: unknown;

@@ -50,6 +50,7 @@ export function Curve({ width, height, points, spreadHz, reading, roots, arcs, s
     <View role="img" aria-label={label} style={{ width, height }}>
       <Svg width={width} height={height} viewBox={`0 0 ${width} ${height}`}>
         {plot.bars.map((bar) => <Rect key={`${bar.fromDeg}`} x={bar.x} y={y1} width={bar.width} height={y0 - y1} fill={color.calculatedTint} />)}
+        {plot.yTicks.map((line) => <Path key={line.hz} d={`M${x0} ${line.y}H${x1}`} stroke={color.ruleSoft} strokeWidth={1} />)}
         <Relation width={width} height={height} points={points} spreadHz={spreadHz} bottomHz={bottomHz} topHz={plot.topHz} yTicks={plot.yTicks} />
         {reading && (
           <G>
@@ -84,7 +85,7 @@ const Relation = memo(function Relation({ width, height, points, spreadHz, botto
     <G>
       <VictoryChart standalone={false} width={width} height={height} padding={PADDING} domain={{ x: [-180, 180], y: [bottomHz, topHz] }}>
         <VictoryAxis dependentAxis axisValue={-180} tickValues={yTicks.map(({ hz }) => hz)} tickFormat={(hz: number) => fixed(hz, 0)}
-          style={{ axis: { stroke: 'none' }, ticks: { stroke: 'none', size: 0 }, grid: { stroke: color.ruleSoft, strokeWidth: 1, strokeDasharray: 'none' }, tickLabels: { ...tick, padding: 8 } }} />
+          style={{ axis: { stroke: 'none' }, ticks: { stroke: 'none', size: 0 }, grid: { stroke: 'none' }, tickLabels: { ...tick, padding: 8 } }} />
         <VictoryAxis axisValue={bottomHz} tickValues={width < 280 ? [-180, -90, 0, 90, 180] : [-180, -120, -60, 0, 60, 120, 180]} tickFormat={(deg: number) => degree(deg)}
           style={{ axis: { stroke: color.edge, strokeWidth: 1 }, ticks: { stroke: color.edge, size: 5 }, grid: { stroke: 'none' }, tickLabels: { ...tick, padding: 4 } }} />
         <VictoryArea data={band} interpolation="linear" style={{ data: { fill: color.calculated, fillOpacity: 0.22, stroke: 'none' } }} />

@@ -31,13 +31,18 @@ export function DoubleBondPlots({ finding, reading, decided }: {
     shown ? hz(shown.jHz) : quickText.noneWord,
   );
   const held = rows.filter((row) => row.compounds.length > 0).map((row) => quickText.ladderCount(row.compounds.length, quickText.geometry[row.geometry])).join(', ');
+  const notes = [
+    isCarbon ? quickText.carbonNote : quickText.ladderNote(finding.className),
+    held === '' ? '' : quickText.ladderTicks(held),
+    rows.some((row) => row.geometry === 'geminal') ? quickText.ladderGeminal : '',
+  ];
   const compounds = rows.flatMap((row) => row.compounds.map((compound) => ({ ...compound, geometry: row.geometry })));
   const weights = new Map(finding.likelihoods.map(({ geometry, weight }) => [geometry, weight]));
   return (
     <Card flush title={isCarbon ? quickText.carbonLadder : undefined}>
       <View style={styles.plot}>
         <View onLayout={onLayout} style={styles.box}>{width > 0 && <Ladder width={width} rows={rows} reading={shown} label={label} />}</View>
-        <RichText kind="caption" tone="muted" text={[quickText.ladderNote(finding.className), held === '' ? '' : quickText.ladderTicks(held)].join(' ')} />
+        <RichText kind="caption" tone="muted" text={notes.filter(Boolean).join(' ')} />
       </View>
       <Disclosure label={compounds.length > 0 ? quickText.ladderTable : quickText.ladderRanges} openLabel={quickText.hideTable}>
         <View style={styles.tables}>

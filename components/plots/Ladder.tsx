@@ -11,7 +11,7 @@ import { color, families } from '../theme/tokens';
 
 /** Known couplings of each geometry as bars and ticks, the reading as a band across. It grows with the reading; overlap is drawn. */
 export function Ladder({ width, rows, reading, label }: { width: number; rows: readonly LadderRow[]; reading: Pick<HzReading, 'jHz' | 'seHz'> | null; label: string }) {
-  const padding = { left: 76, right: 14, top: 36, bottom: 28 };
+  const padding = { left: 76, right: 14, top: reading ? 36 : 8, bottom: 28 };
   const plot = ladderPlot({ width, padding, rowHeight: 46, rows, reading: reading ?? { jHz: 0, seHz: 0 } });
   const text = { fontFamily: families.sans, fontSize: 13, fill: color.muted };
   return (

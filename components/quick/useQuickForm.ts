@@ -1,3 +1,4 @@
+import { useLocalSearchParams } from 'expo-router';
 import { useCallback, useEffect, useMemo, useState } from 'react';
 
 import type { QuickLookRequest } from '@/shared/contracts/quickLook';
@@ -11,6 +12,12 @@ const readKept = (): string => {
 };
 const keep = (query: string) => {
   try { window.sessionStorage.setItem(KEPT_AT, query); } catch { /* the address still holds them */ }
+};
+
+/** What the address held when the screen opened; while the router is on its way here from another screen, that is still the other's address. */
+const startQuery = (routed: Record<string, string | string[]>): string => {
+  if (window.location.pathname === '/') return window.location.search;
+  return new URLSearchParams(Object.entries(routed).filter((entry): entry is [string, string] => typeof entry[1] === 'string')).toString();
 };
 
 const WRITE_REST_MS = 250;
@@ -28,7 +35,8 @@ export interface QuickFormHandle {
 }
 
 export function useQuickForm(): QuickFormHandle {
-  const [form, setForm] = useState(() => fromQuery(window.location.search || readKept()));
+  const routed = useLocalSearchParams();
+  const [form, setForm] = useState(() => fromQuery(startQuery(routed) || readKept()));
   const query = toQuery(form);
   useEffect(() => {
     // replaced, not pushed: Back leaves the quick look and does not undo key presses. The router's own state of the entry stays.

@@ -112,7 +112,10 @@ function Parameters({ relation }: { relation: RelationSummary }) {
   const say = relationText.parameterColumns;
   const shown = (set: string | null, name: string) => {
     const found = find(set, name);
-    return found ? `${fixed(found.value, decimalsOf(found.value))}${found.unit === '°' ? '°' : ''}` : '–';
+    if (!found) return '–';
+    // as many decimals as the column needs, so that its points stand under each other
+    const decimals = Math.max(...sets.map((other) => decimalsOf(find(other, name)?.value ?? 0)));
+    return `${found.value === 0 ? '0' : fixed(found.value, decimals)}${found.unit === '°' ? '°' : ''}`;
   };
   return (
     <Card title={relationText.parameters} flush>
@@ -127,8 +130,8 @@ function Parameters({ relation }: { relation: RelationSummary }) {
 
 const decimalsOf = (value: number) => Math.min(4, `${value}`.split('.')[1]?.length ?? 0);
 const SUBSCRIPT = '₀₁₂₃₄₅₆₇₈₉';
-/** P1 as _P_₁. */
-const parameterHead = (name: string) => name.replace(/^([A-Za-z]+)(\d*)$/, (_, letters: string, digits: string) => `_${letters}_${[...digits].map((digit) => SUBSCRIPT[Number(digit)]).join('')}`);
+/** P1 as _P_₁; a word stays a word. */
+const parameterHead = (name: string) => name.replace(/^([A-Za-z])(\d*)$/, (_, letters: string, digits: string) => `_${letters}_${[...digits].map((digit) => SUBSCRIPT[Number(digit)]).join('')}`);
 
 function Checks({ relation }: { relation: RelationSummary }) {
   if (relation.checks.length === 0) return null;

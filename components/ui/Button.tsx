@@ -48,7 +48,7 @@ export function Button({
   const tone = toneOf(kind, disabledBecause !== undefined);
   const spoken = about ? `${label}, ${about}` : iconOnly ? label : undefined;
   return (
-    <View style={grow !== undefined && place === 'bar' && { flexGrow: grow, flexBasis: 0 }}>
+    <View style={grow !== undefined && place === 'bar' && { flexGrow: grow, flexShrink: 1 }}>
       <Pressable
         ref={buttonRef}
         role="button"

@@ -14,7 +14,7 @@ export function LinkButton({ href, label, kind = 'plain', small = false, icon, g
 }) {
   const { isWide } = useLayout();
   return (
-    <RouteLink href={href} style={[buttonStyles.base, buttonStyles[kind], small && isWide && buttonStyles.small, grow !== undefined && { flexGrow: grow, flexBasis: 0 }]}>
+    <RouteLink href={href} style={[buttonStyles.base, buttonStyles[kind], small && isWide && buttonStyles.small, grow !== undefined && { flexGrow: grow, flexShrink: 1 }]}>
       {icon}
       <Text kind={small ? 'denseStrong' : 'strong'} tone={kind === 'primary' ? 'onInk' : 'ink'} align="center"><RichInline text={label} /></Text>
     </RouteLink>

@@ -39,7 +39,7 @@ export function Screen({ title, documentTitle, crumb, back, aside, actions, chil
   return (
     <View style={styles.screen}>
       <ScrollView style={styles.scroll} contentContainerStyle={[styles.page, isWide && styles.pageWide]}>
-        <View style={[styles.top, isWide ? styles.topWide : back !== undefined && styles.topSub]}>
+        <View style={[styles.top, !isWide && styles.topPhone, isWide ? styles.topWide : back !== undefined && styles.topSub]}>
           {!isWide && (back === undefined
             ? <Sign />
             : <RouteLink href={back} label={uiText.back} style={styles.back}><Icon name="left" size={20} /></RouteLink>)}
@@ -84,10 +84,11 @@ const styles = StyleSheet.create({
   page: { paddingHorizontal: space.lg, paddingBottom: space.xl, flexGrow: 1 },
   pageWide: { paddingHorizontal: space.xxl, paddingTop: space.xl, paddingBottom: space.xxl, width: '100%', maxWidth: size.content + 2 * space.xxl },
   top: { flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: space.md, minHeight: size.top, paddingTop: space.lg, paddingBottom: space.md },
+  topPhone: { columnGap: space.sm },
   topSub: { flexWrap: 'nowrap', alignItems: 'flex-start' },
   topWide: { alignItems: 'flex-end', minHeight: 0, paddingTop: 0, paddingBottom: space.lg },
   back: { width: size.touch, height: size.touch, marginLeft: -space.md, alignItems: 'center', justifyContent: 'center' },
-  title: { flex: 1, minWidth: 160 },
+  title: { flex: 1, minWidth: 120 },
   actions: { flexDirection: 'row', gap: space.md, alignItems: 'flex-start' },
   bar: {
     flexDirection: 'row', gap: space.md, minHeight: size.actions, paddingVertical: space.md, paddingHorizontal: space.lg, borderTopWidth: border.hair, borderTopColor: color.rule,

@@ -1,5 +1,4 @@
-import { type CSSProperties, type ReactNode } from 'react';
-import { ScrollView, StyleSheet, View } from 'react-native';
+import { useEffect, useRef, useState, type CSSProperties, type ReactNode } from 'react';
 
 import { plainText } from '@/shared/format/richText';
 
@@ -29,9 +28,10 @@ export function Table<Row>({ caption, columns, rows, rowKey, rowTone }: {
   caption: string; columns: readonly Column<Row>[]; rows: readonly Row[]; rowKey: (row: Row, at: number) => string;
   rowTone?: (row: Row) => 'plain' | 'chosen' | 'query' | 'outlier';
 }) {
+  const [frame, scrolls] = useScrolls();
+  const named = scrolls ? { tabIndex: 0, role: 'region', 'aria-label': plainText(caption) } : {};
   return (
-    <View style={styles.frame}>
-      <ScrollView horizontal contentContainerStyle={styles.content} tabIndex={0} aria-label={plainText(caption)} role="region">
+    <div ref={frame} style={frameStyle} {...named}>
         <table style={table}>
           <caption style={hiddenCaption}>{plainText(caption)}</caption>
           <thead>
@@ -63,9 +63,24 @@ export function Table<Row>({ caption, columns, rows, rowKey, rowTone }: {
             ))}
           </tbody>
         </table>
-      </ScrollView>
-    </View>
+    </div>
   );
+}
+
+/** Whether the table is wider than its frame: only then is the frame a stop of the keyboard. */
+function useScrolls() {
+  const frame = useRef<HTMLDivElement>(null);
+  const [scrolls, setScrolls] = useState(false);
+  useEffect(() => {
+    const box = frame.current;
+    if (!box) return undefined;
+    const look = () => setScrolls(box.scrollWidth > box.clientWidth + 1);
+    look();
+    const watch = new ResizeObserver(look);
+    watch.observe(box);
+    return () => watch.disconnect();
+  }, []);
+  return [frame, scrolls] as const;
 }
 
 const tints = { plain: 'transparent', chosen: color.measuredTint, query: color.cautionTint, outlier: color.cautionTint };
@@ -77,4 +92,4 @@ const headCell: CSSProperties = {
 };
 const bodyCell: CSSProperties = { fontSize: 15, lineHeight: '20px', paddingTop: space.sm, paddingBottom: space.sm, verticalAlign: 'top', borderBottom: `1px solid ${color.ruleSoft}` };
 const hiddenCaption: CSSProperties = { position: 'absolute', width: 1, height: 1, overflow: 'hidden', clip: 'rect(0 0 0 0)', whiteSpace: 'nowrap' };
-const styles = StyleSheet.create({ frame: { minWidth: 0 }, content: { minWidth: '100%' } });
+const frameStyle: CSSProperties = { minWidth: 0, maxWidth: '100%', overflowX: 'auto', position: 'relative' };

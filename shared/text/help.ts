@@ -15,7 +15,7 @@ export const helpText = {
       id: 'answer',
       title: 'How to read an answer',
       sentences: [
-        'The first word is the grade. assigned: one geometry fits and the others held do not. tentative: one is favoured, but a number or a step is not strong enough. not decided: this _J_ does not tell, and the next measurement is named.',
+        'The first word is the grade. “Assigned”: one geometry fits and the others held do not. “Tentative”: one is favoured, but a number or a step is not strong enough. “Not decided”: this _J_ does not tell, and the next measurement is named.',
         'A filled mark and a solid bar stand for assigned, a half-filled mark and a dashed bar for tentative, an open mark and an outlined bar for not decided.',
         'Three inks: a blue square is measured, a green circle is calculated by a relation, a brown diamond is what a person judged. Nobody judges in a quick look.',
         'An angle from one _J_ is tentative at most, because several angles give the same value.',
@@ -38,7 +38,7 @@ export const helpText = {
       id: 'typing',
       title: 'Typing a reading',
       sentences: [
-        '9.6, 9,6 and 9.6 Hz are all read. “ca. 7” is read as 7 ± 1. “< 1.5” is an interval from 0, never a value. What was understood stands under the field.',
+        '9.6, 9,6 and 9.6 Hz are all read. “ca. 7” is read as 7\u00a0±\u00a01. “< 1.5” is an interval from 0, never a value. What was understood stands under the field.',
         '± is one standard error of the reading. Without one, 0.2 Hz stands; that is common practice, not a measurement of your spectrum.',
         'A value below 0.3 is taken for a distance in ppm: type the field, and the same line in Hz is offered.',
         'Groups are named by their first atom and its other neighbours, H included. All four are needed before the generalised equation runs.',

@@ -1,4 +1,4 @@
-import { act, render, screen, within } from '@testing-library/react';
+import { act, fireEvent, render, screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { useState } from 'react';
 
@@ -21,7 +21,7 @@ describe('Button', () => {
     const button = screen.getByRole('button', { name: 'Sign' });
     expect(button.getAttribute('aria-disabled')).toBe('true');
     expect(document.getElementById(button.getAttribute('aria-describedby')!)?.textContent).toBe('Query 1 is open.');
-    await userEvent.click(button);
+    fireEvent.click(button);
     expect(press).not.toHaveBeenCalled();
   });
 
@@ -115,7 +115,7 @@ it('chooses one of many in a sheet', async () => {
   const change = jest.fn();
   render(<Select label="Role" value={null} placeholder="choose" onChange={change} options={[{ value: 'chemist', label: 'Chemist' }, { value: 'lead', label: 'Lead', disabledBecause: 'A guest is no lead.' }]} />);
   await userEvent.click(screen.getByRole('button', { name: 'Role choose' }));
-  await userEvent.click(screen.getByRole('radio', { name: /Lead/ }));
+  fireEvent.click(screen.getByRole('radio', { name: /Lead/ }));
   expect(change).not.toHaveBeenCalled();
   await userEvent.click(screen.getByRole('radio', { name: 'Chemist' }));
   expect(change).toHaveBeenCalledWith('chemist');
