@@ -25,7 +25,7 @@ const PICTURE = { width: 480, height: 200, hzAcross: 48, jHz: 15.7, widthHz: 1.4
 export function demoFile(key: DemoFileKey): DemoFile {
   return key === 'peakList'
     ? { name: 'VN-011 peak list.csv', bytes: Buffer.from(PEAK_LIST, 'utf8') }
-    : { name: 'VN-011 H-3 expansion.png', bytes: doubletPicture() };
+    : { name: 'VN-011 H3 expansion.png', bytes: doubletPicture() };
 }
 
 /** Draws the doublet and packs it as an 8-bit grey PNG. */

@@ -4,16 +4,16 @@ import { G, angle, answer, candidate, conditions, content, evidence, reading, si
 const allSteps = ['reciprocity', 'domain', 'second-root', 'other-evidence', 'alternatives'] as const;
 
 /*
- * H-3 and H-4 of a 4-substituted piperidin-3-ol, seen from C-3 to C-4. The two diastereomers differ in how the groups sit
+ * H3 and H4 of a 4-substituted piperidin-3-ol, seen from C-3 to C-4. The two diastereomers differ in how the groups sit
  * around C-4, so each has a calculation of its own: in the trans isomer C-2 and C-5 are gauche with both H axial (φ near 180°),
- * in the cis isomer H-4 is equatorial (φ near −60°).
+ * in the cis isomer H4 is equatorial (φ near −60°).
  */
 const c3: [string, string] = [G.ch2N, G.hydroxy];
 const transAt = (group: string) => ({ front: c3, rear: [group, G.ethylChain] as [string, string] });
 const cisAt = (group: string) => ({ front: c3, rear: [G.ethylChain, group] as [string, string] });
 const cisAndTrans = () => [
-  candidate('trans', '3,4-trans', [angle('c1', 155, 205)], 'Both groups equatorial, H-3 and H-4 axial.'),
-  candidate('cis', '3,4-cis', [angle('c2', -75, -40)], 'One group axial; H-3 axial and H-4 equatorial, or the other chair.'),
+  candidate('trans', '3,4-trans', [angle('c1', 155, 205)], 'Both groups equatorial, H3 and H4 axial.'),
+  candidate('cis', '3,4-cis', [angle('c2', -75, -40)], 'One group axial; H3 axial and H4 equatorial, or the other chair.'),
 ];
 
 /** Piperidinol series: angles from H–C–C–H in and off the ring. */
@@ -25,14 +25,14 @@ export const piperidinols: DemoCase[] = [
       compound: { name: '1-benzyl-4-methylpiperidin-3-ol, isomer A', batch: 'PP-003-1', notebook: 'TE-040-11', structureNote: 'First eluting isomer from the hydroboration.' },
       conditions: conditions('500.13', 'CDCl3', '298', '18 mM'),
       readings: [
-        reading('r1', ['H-3', 'H-4'], '9.6', { partner: '9.6', where: '3.21 ppm, td' }),
-        reading('r2', ['H-2ax', 'H-3'], '9.9', { partner: '9.8', where: '1.81 ppm, dd', note: 'The other large splitting of H-3.' }),
-        reading('r3', ['H-2eq', 'H-3'], '4.4', { partner: '4.5', where: '3.03 ppm, ddd' }),
+        reading('r1', ['H3', 'H4'], '9.6', { partner: '9.6', where: '3.21 ppm, td' }),
+        reading('r2', ['H2ax', 'H3'], '9.9', { partner: '9.8', where: '1.81 ppm, dd', note: 'The other large splitting of H3.' }),
+        reading('r3', ['H2eq', 'H3'], '4.4', { partner: '4.5', where: '3.03 ppm, ddd' }),
       ],
       calculations: [singleBond('c1', 'r1', transAt(G.methyl), 'ring'), singleBond('c2', 'r1', cisAt(G.methyl), 'ring')],
       candidates: cisAndTrans(),
-      evidence: [evidence('e1', 'other-coupling', 'for', 'trans', 'H-3 carries a second large splitting, 9.9 Hz to H-2ax: H-3 is axial.')],
-      answer: answer('tentative', 'trans', '3,4-trans, both groups equatorial.', '9.6 Hz needs H-3 and H-4 nearly antiperiplanar; the gauche angle of the cis isomer gives a small coupling.'),
+      evidence: [evidence('e1', 'other-coupling', 'for', 'trans', 'H3 carries a second large splitting, 9.9 Hz to H2ax: H3 is axial.')],
+      answer: answer('tentative', 'trans', '3,4-trans, both groups equatorial.', '9.6 Hz needs H3 and H4 nearly antiperiplanar; the gauche angle of the cis isomer gives a small coupling.'),
       tags: ['ring', 'isomer pair'],
     }),
     acts: [
@@ -49,10 +49,10 @@ export const piperidinols: DemoCase[] = [
       question: '4-Methylpiperidin-3-ol PP-004, second isomer: cis?',
       compound: { name: '1-benzyl-4-methylpiperidin-3-ol, isomer B', batch: 'PP-004-1', notebook: 'TE-043-08', structureNote: 'Second eluting isomer.' },
       conditions: conditions('500.13', 'CDCl3', '298', '15 mM'),
-      readings: [reading('r1', ['H-3', 'H-4'], '3.1', { partner: '3.2', where: '3.74 ppm' }), reading('r2', ['H-2a', 'H-3'], '2.4', { partner: '2.5', where: '2.72 ppm' })],
+      readings: [reading('r1', ['H3', 'H4'], '3.1', { partner: '3.2', where: '3.74 ppm' }), reading('r2', ['H2a', 'H3'], '2.4', { partner: '2.5', where: '2.72 ppm' })],
       calculations: [singleBond('c1', 'r1', transAt(G.methyl), 'ring'), singleBond('c2', 'r1', cisAt(G.methyl), 'ring')],
       candidates: cisAndTrans(),
-      answer: answer('tentative', 'cis', '3,4-cis, H-4 equatorial or the other chair.', '3.1 Hz excludes the antiperiplanar angle of the trans isomer with both groups equatorial.', { leftOpen: 'Which of the two chairs of the cis isomer is the larger part.' }),
+      answer: answer('tentative', 'cis', '3,4-cis, H4 equatorial or the other chair.', '3.1 Hz excludes the antiperiplanar angle of the trans isomer with both groups equatorial.', { leftOpen: 'Which of the two chairs of the cis isomer is the larger part.' }),
       tags: ['ring', 'isomer pair'],
     }),
     acts: [
@@ -68,7 +68,7 @@ export const piperidinols: DemoCase[] = [
       question: '4-Propylpiperidin-3-ol PP-009: relative configuration for the report',
       compound: { name: '1-benzyl-4-propylpiperidin-3-ol hydrochloride', batch: 'PP-009-4', notebook: 'TE-043-16', structureNote: 'Salt, crystals from ethanol.' },
       conditions: conditions('600.30', 'CD3OD', '298', '10 mM'),
-      readings: [reading('r1', ['H-3', 'H-4'], '10.1', { se: '0.1', partner: '10.1', where: '3.52 ppm, td' })],
+      readings: [reading('r1', ['H3', 'H4'], '10.1', { se: '0.1', partner: '10.1', where: '3.52 ppm, td' })],
       calculations: [singleBond('c1', 'r1', transAt(G.ethylChain), 'ring'), singleBond('c2', 'r1', cisAt(G.ethylChain), 'ring')],
       candidates: cisAndTrans(),
       evidence: [evidence('e1', 'x-ray', 'for', 'trans', 'Single crystal of this batch: H–C3–C4–H torsion 174°. Structure in the crystallography log, entry 118.')],
@@ -90,15 +90,15 @@ export const piperidinols: DemoCase[] = [
   {
     key: 'no-root', project: 'PIP', author: 'tomas', opened: at(4, '15:15'),
     content: content({
-      question: 'PP-014: 14.8 Hz at H-2ax, which partner?',
+      question: 'PP-014: 14.8 Hz at H2ax, which partner?',
       compound: { name: '1-benzyl-4-ethylpiperidin-3-ol', batch: 'PP-014-1', notebook: 'TE-044-14', structureNote: 'Crude after hydrogenation.' },
       conditions: conditions('400.13', 'CDCl3', '298'),
-      readings: [reading('r1', ['H-2ax', 'H-3'], '14.8', { where: '1.74 ppm', note: 'Largest splitting of the multiplet; partner not found yet.' })],
+      readings: [reading('r1', ['H2ax', 'H3'], '14.8', { where: '1.74 ppm', note: 'Largest splitting of the multiplet; partner not found yet.' })],
       calculations: [singleBond('c1', 'r1', { front: [G.amine, G.h], rear: [G.hydroxy, G.branched] }, 'ring')],
       candidates: [candidate('trans', '3,4-trans', [angle('c1', 155, 205)]), candidate('cis', '3,4-cis', [angle('c1', 40, 75)])],
       tags: ['ring', 'crude'],
     }),
-    acts: [{ at: at(3, '08:40'), act: 'comment', by: 'amina', target: 'readings/r1', text: 'No vicinal angle reaches this. The geminal partner H-2eq is a fair guess: 12 to 15 Hz is usual there.' }],
+    acts: [{ at: at(3, '08:40'), act: 'comment', by: 'amina', target: 'readings/r1', text: 'No vicinal angle reaches this. The geminal partner H2eq is a fair guess: 12 to 15 Hz is usual there.' }],
   },
   {
     key: 'chain', project: 'PIP', author: 'tomas', opened: at(8, '11:30'),
@@ -106,7 +106,7 @@ export const piperidinols: DemoCase[] = [
       question: 'Ring-opened amino alcohol PP-017: syn or anti (zigzag)?',
       compound: { name: '3-(dimethylamino)-4-methylhexan-2-ol', batch: 'PP-017-1', notebook: 'TE-044-05', structureNote: 'Open chain, from the ring opening of PP-003.' },
       conditions: conditions('500.13', 'CDCl3', '298'),
-      readings: [reading('r1', ['H-2', 'H-3'], '6.9', { partner: '6.8', where: '3.86 ppm and 2.31 ppm' })],
+      readings: [reading('r1', ['H2', 'H3'], '6.9', { partner: '6.8', where: '3.86 ppm and 2.31 ppm' })],
       calculations: [singleBond('c1', 'r1', { front: [G.hydroxy, G.methyl], rear: [G.amine, G.branched] }, 'free')],
       candidates: [candidate('syn', 'syn (zigzag)', [], 'OH and N on the same side of the zigzag chain.'), candidate('anti', 'anti (zigzag)', [], 'OH and N on opposite sides of the zigzag chain.')],
       answer: answer('not-decided', null, '6.9 Hz may be an average over rotamers.', '6.9 Hz on a bond that turns may be an average; either isomer can give it.', { leftOpen: '²J(C,H) and ³J(C,H) about the bond, or the cyclic carbamate.' }),
@@ -120,10 +120,10 @@ export const piperidinols: DemoCase[] = [
       question: 'Bicycle PP-020: hydroxyl exo or endo?',
       compound: { name: '2-azabicyclo[2.2.1]heptan-6-ol, N-Boc', batch: 'PP-020-2', notebook: 'TE-043-22', structureNote: 'Rotamers of the carbamate at 298 K; read at 353 K.' },
       conditions: conditions('400.13', 'DMSO-d6', '353'),
-      readings: [reading('r1', ['H-1', 'H-6'], '< 1.5', { where: '4.02 ppm, broad', note: 'No splitting beyond the line width of 1.5 Hz.' })],
+      readings: [reading('r1', ['H1', 'H6'], '< 1.5', { where: '4.02 ppm, broad', note: 'No splitting beyond the line width of 1.5 Hz.' })],
       calculations: [singleBond('c1', 'r1', { front: [G.amine, G.branched], rear: [G.hydroxy, G.ethylChain] }, 'ring')],
-      candidates: [candidate('exo', 'exo-OH', [angle('c1', 70, 90)], 'H-6 endo, about 80° to H-1.'), candidate('endo', 'endo-OH', [angle('c1', 35, 55)], 'H-6 exo, about 45° to H-1.')],
-      answer: answer('not-decided', null, 'exo-OH is favoured; the strained ring leaves it open.', 'A coupling below 1.5 Hz fits the angle of endo H-6 better, but the ring is strained and the relation was not made for it.', { leftOpen: 'NOE from H-6 to the bridge CH2.' }),
+      candidates: [candidate('exo', 'exo-OH', [angle('c1', 70, 90)], 'H6 endo, about 80° to H1.'), candidate('endo', 'endo-OH', [angle('c1', 35, 55)], 'H6 exo, about 45° to H1.')],
+      answer: answer('not-decided', null, 'exo-OH is favoured; the strained ring leaves it open.', 'A coupling below 1.5 Hz fits the angle of endo H6 better, but the ring is strained and the relation was not made for it.', { leftOpen: 'NOE from H6 to the bridge CH2.' }),
       tags: ['bicycle', 'limit'],
     }),
     acts: [
@@ -140,11 +140,11 @@ export const piperidinols: DemoCase[] = [
       compound: { name: '1-benzyl-4-butylpiperidin-3-ol', batch: 'PP-022-1', notebook: 'TE-044-08', structureNote: 'One isomer after chromatography.' },
       conditions: conditions('500.13', 'CDCl3', '298', '20 mM'),
       readings: [
-        reading('r1', ['H-3', 'H-4'], '9.2', { partner: '9.3', where: '3.28 ppm, td' }),
-        reading('r2', ['H-2ax', 'H-3'], '9.4', { partner: '9.5', where: '1.86 ppm' }),
-        reading('r3', ['H-2eq', 'H-3'], '4.3', { partner: '4.2', where: '3.01 ppm' }),
-        reading('r4', ['H-2ax', 'H-2eq'], '10.9', { partner: '11.0', path: '2J', where: '1.86 ppm and 3.01 ppm', note: 'Geminal; size only, the sign was not measured.' }),
-        reading('r5', ['H-4', 'H-5ax'], '11.4', { se: '0.4', where: '1.42 ppm, overlapped' }),
+        reading('r1', ['H3', 'H4'], '9.2', { partner: '9.3', where: '3.28 ppm, td' }),
+        reading('r2', ['H2ax', 'H3'], '9.4', { partner: '9.5', where: '1.86 ppm' }),
+        reading('r3', ['H2eq', 'H3'], '4.3', { partner: '4.2', where: '3.01 ppm' }),
+        reading('r4', ['H2ax', 'H2eq'], '10.9', { partner: '11.0', path: '2J', where: '1.86 ppm and 3.01 ppm', note: 'Geminal; size only, the sign was not measured.' }),
+        reading('r5', ['H4', 'H5ax'], '11.4', { se: '0.4', where: '1.42 ppm, overlapped' }),
       ],
       calculations: [singleBond('c1', 'r1', transAt(G.ethylChain), 'ring'), singleBond('c2', 'r1', cisAt(G.ethylChain), 'ring')],
       candidates: [...cisAndTrans(), candidate('twist', '3,4-cis, twist form', [], 'The cis isomer out of the chair, by the N-benzyl group.')],
@@ -163,7 +163,7 @@ export const piperidinols: DemoCase[] = [
       question: 'PP-025: does a splitting of about 7 Hz say anything?',
       compound: { name: 'side product PP-025', batch: 'PP-025-1', notebook: 'TE-044-24', structureNote: '' },
       conditions: conditions('', '', ''),
-      readings: [reading('r1', ['H-a', 'H-b'], 'ca. 7', { se: '', note: 'Read off the screen of the spectrometer.' })],
+      readings: [reading('r1', ['Ha', 'Hb'], 'ca. 7', { se: '', note: 'Read off the screen of the spectrometer.' })],
       calculations: [singleBond('c1', 'r1', null, 'unknown')],
       candidates: [],
       tags: [],
