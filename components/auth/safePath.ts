@@ -1,9 +1,10 @@
-import type { Href } from 'expo-router';
-
 import type { Path } from '../ui/RouteLink';
 
-/** A path of this product as a link; the one place where text becomes a typed path. */
-export const asPath = (text: string): Path => text as Extract<Href, string>;
+/** A path of this product as a link; the one place where text becomes a typed path, whether or not the route types have been generated. */
+export function asPath(text: string): Path {
+  const path: unknown = text;
+  return path as Path;
+}
 
 /**
  * Where to go after signing in: the path a person came from, when it is a path of this product, else the cases. Anything that

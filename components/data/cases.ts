@@ -1,7 +1,7 @@
 import { infiniteQueryOptions, keepPreviousData, queryOptions, useInfiniteQuery, useMutation, useQuery, useQueryClient, type QueryClient } from '@tanstack/react-query';
 
 import type {
-  CaseListResponse, CaseResponse, CompareResponse, CreateCaseRequest, EventsResponse, RevisionResponse, RevisionsResponse, SaveCaseRequest,
+  CaseListResponse, CaseResponse, CompareResponse, CreateCaseRequest, EventsResponse, RevisionsResponse, SaveCaseRequest,
 } from '@/shared/contracts/cases';
 
 import { api } from './api';
@@ -87,11 +87,7 @@ export const revisionsOptions = (id: string) => queryOptions<RevisionsResponse, 
   queryKey: [...caseKeys.history(id), 'revisions'], queryFn: ({ signal }) => api.get(`/api/cases/${id}/revisions`, 'revisionsResponse', { signal }),
 });
 export const useRevisions = (id: string, enabled: boolean) => useQuery({ ...revisionsOptions(id), enabled });
-/** A revision never changes: once read it is kept. */
-export const useRevision = (id: string, number: number | null) => useQuery<RevisionResponse, ApiProblem>({
-  queryKey: ['cases', 'revision', id, number], enabled: number !== null, staleTime: STALE.never,
-  queryFn: ({ signal }) => api.get(`/api/cases/${id}/revisions/${number ?? ''}`, 'revisionResponse', { signal }),
-});
+/** Two revisions never change: once compared, the answer is kept. */
 export const useComparison = (id: string, from: number | null, to: number | null) => useQuery<CompareResponse, ApiProblem>({
   queryKey: ['cases', 'compare', id, from, to], enabled: from !== null && to !== null && from !== to, staleTime: STALE.never,
   queryFn: ({ signal }) => api.get(`/api/cases/${id}/compare?from=${from ?? ''}&to=${to ?? ''}`, 'compareResponse', { signal }),

@@ -108,10 +108,12 @@ export function partValue(path: string, value: unknown, content: CaseContent): s
   if (field === 'path' && head === 'readings') return pathWords[value as keyof typeof pathWords];
   if (head === 'evidence' && field === 'kind') return evidenceKindWords[value as EvidenceKind];
   if (field === 'bearing') return bearingWords[value as keyof typeof bearingWords];
-  if (head === 'readings' && HZ_FIELDS.has(field)) return withUnit(String(value), 'Hz');
-  if (field === 'fieldMHz') return withUnit(String(value), 'MHz');
-  if (field === 'temperatureK') return withUnit(String(value), 'K');
-  return String(value);
+  // what is left of the content's fields is text
+  const text = typeof value === 'string' ? value : JSON.stringify(value);
+  if (head === 'readings' && HZ_FIELDS.has(field)) return withUnit(text, 'Hz');
+  if (field === 'fieldMHz') return withUnit(text, 'MHz');
+  if (field === 'temperatureK') return withUnit(text, 'K');
+  return text;
 }
 
 /** Limits that a form says before the server has to. */

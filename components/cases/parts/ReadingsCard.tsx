@@ -49,7 +49,8 @@ export function ReadingsCard() {
     },
     { key: 'j', head: say.head.j, numeric: true, tone: 'measured', cell: (reading) => <View style={styles.cell}><Text kind="denseStrong" tone={problemsOf(reading, found.trail).length > 0 ? 'error' : 'measured'} align="right" noWrap>{reading.j.trim() || '–'}</Text></View> },
     { key: 'se', head: say.head.se, numeric: true, cell: (reading) => <View style={styles.cell}><Text kind="dense" tone={reading.se.trim() === '' ? 'muted' : 'ink'} align="right" noWrap>{reading.se.trim() || '0.2'}</Text></View> },
-    { key: 'partner', head: say.head.partner, cell: (reading) => <View style={styles.cell}><Partner reading={reading} /></View> },
+    // a phone has no room for both: while something waits for the server, where it is kept matters more
+    ...(editor.isDirty && !isWide ? [] : [{ key: 'partner', head: say.head.partner, cell: (reading: Reading) => <View style={styles.cell}><Partner reading={reading} /></View> }]),
   ];
   if (isWide) columns.push({ key: 'where', head: say.where, wraps: true, cell: (reading) => <View style={styles.cell}><Text kind="dense" tone="muted">{reading.where.trim() || '–'}</Text></View> });
   if (editor.isDirty) {

@@ -29,7 +29,7 @@ export function CandidateSheet({ id, onClose }: { id: string | null; onClose: ()
   const existing = content.candidates.find((row) => row.id === id) ?? null;
   const [start] = useState(() => existing ?? emptyCandidate(newRowId()));
   const { form, set, drop } = useKeptForm(reader.id, formKey(found.id, existing === null ? 'candidate.new' : `candidate.${start.id}`), {
-    name: start.name, description: start.description, claims: Object.fromEntries(content.calculations.map((each) => [each.id, claimForm(start, each)])) as Record<string, ClaimForm>,
+    name: start.name, description: start.description, claims: Object.fromEntries(content.calculations.map((each) => [each.id, claimForm(start, each)])),
   });
   const [tried, setTried] = useState(false);
   const claims = content.calculations.map((each) => claimsOf(form.claims[each.id] ?? { kind: 'none' }, each.id));

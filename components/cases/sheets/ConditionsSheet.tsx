@@ -28,10 +28,10 @@ export function ConditionsSheet({ onClose }: { onClose: () => void }) {
     drop();
     onClose();
   };
-  const shown = (problem: ConditionProblem, bad: string, small: string, use: (value: string) => string, put: (value: string) => void) =>
+  const shown = (problem: ConditionProblem, bad: string, small: string, mendLabel: (value: string) => string, put: (value: string) => void) =>
     !tried || problem === null ? {} : {
       error: problem.kind === 'not-a-number' ? bad : small,
-      mends: problem.kind === 'too-small' && problem.meant !== null ? [{ label: use(problem.meant), onPress: () => put(problem.meant ?? '') }] : [],
+      mends: problem.kind === 'too-small' && problem.meant !== null ? [{ label: mendLabel(problem.meant), onPress: () => put(problem.meant ?? '') }] : [],
     };
   const mend = (field !== null ? 1 : 0) + (kelvin !== null ? 1 : 0);
   return (

@@ -58,7 +58,8 @@ describe('what this device keeps', () => {
 
   it('takes from a kept form only what the form still has', () => {
     writeDraft('anna', 'form', { j: '8.', gone: 'x', count: 'not a number', candidateId: 'c1' });
-    const { result } = renderHook(() => useKeptForm('anna', 'form', { j: '', count: 3, candidateId: null as string | null }));
+    const none: string | null = null;
+    const { result } = renderHook(() => useKeptForm('anna', 'form', { j: '', count: 3, candidateId: none }));
     expect(result.current.form).toEqual({ j: '8.', count: 3, candidateId: 'c1' });
     expect(result.current.wasKept).toBe(true);
     act(() => result.current.drop());

@@ -11,11 +11,12 @@ import type { CaseContent } from '@/shared/types/case';
 import { caseAnswer, inCase } from './caseFixture';
 
 jest.mock('expo-router', () => ({ router: {}, usePathname: () => '/' }));
+jest.setTimeout(30_000);                       // typing key by key is slow on two busy cores
 const requests: { path: string; body: unknown }[] = [];
 /** Plays the server: every request is written down and answered. */
 function answer(status: number, body: unknown) {
   globalThis.fetch = ((path: string, init: RequestInit) => {
-    requests.push({ path, body: JSON.parse(String(init.body)) });
+    requests.push({ path, body: JSON.parse(typeof init.body === 'string' ? init.body : 'null') });
     return Promise.resolve({ ok: status < 400, status, text: () => Promise.resolve(JSON.stringify(body)) });
   }) as unknown as typeof fetch;
 }
@@ -97,7 +98,7 @@ describe('typing readings', () => {
     await userEvent.keyboard('7.60{Enter}');
     expect(edits.at(-1)!.readings.at(-1)).toMatchObject({ atomA: 'H4', atomB: 'H5', j: '7.60' });       // digits as typed
     expect(closed).not.toHaveBeenCalled();
-    expect((screen.getByLabelText('First atom') as HTMLInputElement).value).toBe('H5');
+    expect(screen.getByLabelText<HTMLInputElement>('First atom').value).toBe('H5');
   });
 
   it('names what cannot be read at its field, offers the mend, and keeps it as typed only when told', async () => {
@@ -109,7 +110,7 @@ describe('typing readings', () => {
     expect(edits).toEqual([]);
     expect(screen.getByText(/1 field to mend/)).toBeTruthy();
     await userEvent.click(screen.getByRole('button', { name: /^Use 8\.9/ }));
-    expect((screen.getByLabelText('J in hertz') as HTMLInputElement).value).toBe('8.9');
+    expect(screen.getByLabelText<HTMLInputElement>('J in hertz').value).toBe('8.9');
     await userEvent.click(screen.getByRole('button', { name: 'Save reading' }));
     expect(edits.at(-1)!.readings.at(-1)!.j).toBe('8.9');
   });
