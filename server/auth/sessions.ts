@@ -38,7 +38,8 @@ export function createSessions({ db, secret, now }: { db: Sequelize; secret: str
   const store = new (initStore(Store))(options);
   return {
     middleware: session({
-      name: 'tb.sid', secret, store, resave: false, saveUninitialized: false, unset: 'destroy',
+      // not `unset: 'destroy'`: where the session could not be read it is unset as well, and a moment without the database would sign people out
+      name: 'tb.sid', secret, store, resave: false, saveUninitialized: false,
       // 'auto': Secure whenever the request came by TLS, which behind a proxy is told by X-Forwarded-Proto (TRUST_PROXY)
       cookie: { httpOnly: true, sameSite: 'lax', secure: 'auto', path: '/', maxAge: SESSION_MS },
     }),
