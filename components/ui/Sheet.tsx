@@ -8,7 +8,7 @@ import { useLayout } from '../theme/useLayout';
 import { border, color, radius, size, space } from '../theme/tokens';
 import { Icon } from './Glyph';
 import { Heading } from './Heading';
-import { asElement, web, type KeyPress } from './webProps';
+import { asElement, web } from './webProps';
 
 const FOCUSABLE = 'a[href], button:not([disabled]), input, textarea, select, [tabindex="0"]';
 
@@ -20,33 +20,41 @@ export function Sheet({ title, onClose, children, actions }: { title: string; on
   const { isWide } = useLayout();
   const titleId = useId();
   const panel = useRef<View>(null);
+  const close = useRef(onClose);
+  useEffect(() => { close.current = onClose; });
   useEffect(() => {
     const before = document.activeElement;
     const box = asElement(panel.current);
     const wanted = box?.querySelector<HTMLElement>('[autofocus], input, [role="radio"][tabindex="0"]') ?? box?.querySelector<HTMLElement>(FOCUSABLE);
     if (!box?.contains(document.activeElement)) wanted?.focus();
-    return () => { if (before instanceof HTMLElement && before.isConnected) before.focus(); };
+    // the browser's own event: text fields end React's, and a sheet over this one is no part of it in the document
+    const hold = (event: KeyboardEvent) => {
+      if (box === null) return;
+      if (event.key === 'Escape') {
+        event.stopPropagation();
+        event.preventDefault();
+        close.current();
+        return;
+      }
+      if (event.key !== 'Tab') return;
+      const inside = [...box.querySelectorAll<HTMLElement>(FOCUSABLE)].filter((node) => node.tabIndex >= 0);
+      const edge = event.shiftKey ? inside[0] : inside[inside.length - 1];
+      const other = event.shiftKey ? inside[inside.length - 1] : inside[0];
+      if (document.activeElement === edge || !inside.includes(document.activeElement as HTMLElement)) {
+        event.preventDefault();
+        other?.focus();
+      }
+    };
+    box?.addEventListener('keydown', hold);
+    return () => {
+      box?.removeEventListener('keydown', hold);
+      if (before instanceof HTMLElement && before.isConnected) before.focus();
+    };
   }, []);
-  const hold = (event: KeyPress) => {
-    if (event.key === 'Escape') {
-      event.stopPropagation();
-      event.preventDefault();
-      onClose();
-      return;
-    }
-    if (event.key !== 'Tab') return;
-    const inside = [...(asElement(panel.current)?.querySelectorAll<HTMLElement>(FOCUSABLE) ?? [])].filter((node) => node.tabIndex >= 0);
-    const edge = event.shiftKey ? inside[0] : inside[inside.length - 1];
-    const other = event.shiftKey ? inside[inside.length - 1] : inside[0];
-    if (document.activeElement === edge || !inside.includes(document.activeElement as HTMLElement)) {
-      event.preventDefault();
-      other?.focus();
-    }
-  };
   return createPortal(
     <View style={[styles.dim, dimFixed, isWide && styles.dimWide]}>
       <Pressable style={styles.outside} onPress={onClose} tabIndex={-1} aria-hidden />
-      <View ref={panel} role="dialog" aria-labelledby={titleId} style={[styles.panel, isWide && styles.panelWide]} {...web({ 'aria-modal': true, onKeyDown: hold })}>
+      <View ref={panel} role="dialog" aria-labelledby={titleId} style={[styles.panel, isWide && styles.panelWide]} {...web({ 'aria-modal': true })}>
         <View style={styles.head}>
           <View style={styles.title}><Heading id={titleId} text={title} level={2} /></View>
           <Pressable role="button" aria-label={uiText.close} onPress={onClose} style={styles.close}><Icon name="cross" /></Pressable>
