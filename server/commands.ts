@@ -14,7 +14,7 @@ interface Setting {
 }
 
 const USAGE = 'Commands: serve (default) | migrate | demo load|reset|remove [--with-their-work] | admin create --email A --name N --password P (or ADMIN_PASSWORD)';
-const say = (sentence: string) => console.error(sentence);
+const say = (sentence: string) => process.stderr.write(`${sentence}\n`);
 
 /** @throws SettingError for an option that is not known */
 function options<const T extends NonNullable<Parameters<typeof parseArgs>[0]>['options']>(args: string[], known: T) {

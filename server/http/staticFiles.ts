@@ -95,7 +95,7 @@ function sendFile(found: StaticFile, accepts: string | undefined, ifNoneMatch: s
 }
 
 function notFound(response: Response): void {
-  const body: ProblemBody = { type: 'not-found', title: 'Not found', status: 404, detail: 'There is nothing at this address.' };
+  const body: ProblemBody = { type: '/problems/not-found', title: 'Not found', status: 404, detail: 'There is nothing at this address.' };
   response.status(404).setHeader('Cache-Control', 'no-store').type('application/problem+json').send(JSON.stringify(body));
 }
 

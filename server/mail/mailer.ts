@@ -38,7 +38,8 @@ export function localSender(from: string, keep: (letter: Letter) => Promise<void
     version: '1',
     send: (mail, done) => {
       const { to, subject, text } = mail.data;
-      keep({ to: String(to), subject: String(subject), text: String(text) }).then(
+      if (typeof to !== 'string' || typeof text !== 'string') return done(new Error('A mail goes to one address, as text.'), null);
+      keep({ to, subject: subject ?? '', text }).then(
         () => done(null, null),
         (error: unknown) => done(error instanceof Error ? error : new Error('The mail could not be kept.'), null),
       );

@@ -32,7 +32,7 @@ it('shows a visitor the demo’s mails alone, and a real administrator all', asy
   expect((await shown(root)).sort()).toEqual([...visible, ...hidden].sort());
 
   const { body } = await server.visitor().get<MailboxResponse>('/api/mailbox');
-  expect(body.messages[1]).toMatchObject({ link: expect.stringMatching(/^https:\/\/bond\.example\/invitation\/[\w-]{43}$/) });
+  expect(body.messages[1]?.link).toMatch(/^https:\/\/bond\.example\/invitation\/[\w-]{43}$/);
   expect(body.messages[1]?.text).toContain(body.messages[1]?.link);
 });
 

@@ -62,7 +62,7 @@ it('every model has the columns of its table, and every table of ours a model or
   defineModels(app);
   const modelled = new Set<string>();
   for (const model of Object.values(app.models) as ModelStatic<Model>[]) {
-    const table = String(model.getTableName());
+    const { tableName: table } = model;
     modelled.add(table);
     const columns = await owner.query<{ column_name: string; is_nullable: string }>(
       'SELECT column_name AS column_name, is_nullable AS is_nullable FROM information_schema.columns WHERE table_schema = DATABASE() AND table_name = :table', { replacements: { table }, type: QueryTypes.SELECT });

@@ -6,9 +6,9 @@ const STEP = '    ';
 const plain = (part: Part): JsonSchema => (typeof part === 'object' ? part : {});
 
 function limits({ minLength, maxLength, minimum, maximum, exclusiveMinimum, minItems, maxItems, format }: JsonSchema): string {
-  const range = (low: unknown, high: unknown): string => (low === undefined && high === undefined ? '' : `${low === undefined ? '' : String(low)}…${high === undefined ? '' : String(high)}`);
+  const range = (low: number | undefined, high: number | undefined): string => (low === undefined && high === undefined ? '' : `${low ?? ''}…${high ?? ''}`);
   // the schema of a whole number names the limits of the number type; they tell a reader nothing
-  const sizes = range(minimum === Number.MIN_SAFE_INTEGER ? undefined : minimum ?? exclusiveMinimum, maximum === Number.MAX_SAFE_INTEGER ? undefined : maximum);
+  const sizes = range(minimum === Number.MIN_SAFE_INTEGER ? undefined : minimum ?? (typeof exclusiveMinimum === 'number' ? exclusiveMinimum : undefined), maximum === Number.MAX_SAFE_INTEGER ? undefined : maximum);
   const told = [format, range(minLength, maxLength), sizes, range(minItems, maxItems)].filter((text) => text !== undefined && text !== '');
   return told.length === 0 ? '' : ` (${told.join(', ')})`;
 }
