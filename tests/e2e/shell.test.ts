@@ -1,24 +1,12 @@
 import type { Browser } from 'playwright-core';
-import { axeFindings, openBrowser, openPage, PHONE, product, WIDE } from '../helpers/browser';
+import { openBrowser, product, visit, WIDTHS } from '../helpers/browser';
 
 let browser: Browser;
 beforeAll(async () => { browser = await openBrowser(); });
 afterAll(() => browser.close());
 
-const clean = { errors: [], elsewhere: [], serverErrors: [] };
-
-describe.each([['phone', PHONE], ['wide screen', WIDE]] as const)('the first page on a %s', (_name, viewport) => {
-  it.each(['light', 'dark'] as const)('paints in the %s theme without an error and without a serious finding', async (colorScheme) => {
-    const { page, findings, close } = await openPage(browser, { viewport, colorScheme });
-    await page.goto('/');
-    await page.getByRole('heading').first().waitFor();
-    expect(await axeFindings(page)).toEqual([]);
-    expect(findings).toEqual(clean);
-    await close();
-  });
-
-  it('uses the fonts that ship and does not scroll sideways', async () => {
-    const { page, findings, close } = await openPage(browser, { viewport });
+it.each(WIDTHS)('uses the fonts that ship and no others on a %s', async (_name, viewport) => {
+  await visit(browser, { viewport }, async ({ page }) => {
     const fonts: string[] = [];
     page.on('response', (response) => { if (response.url().endsWith('.woff2')) fonts.push(`${response.status()} ${response.headers()['cache-control']}`); });
     await page.goto('/');
@@ -26,17 +14,14 @@ describe.each([['phone', PHONE], ['wide screen', WIDE]] as const)('the first pag
     const families = await page.evaluate(async () => [...await document.fonts.ready].filter((face) => face.status === 'loaded').map((face) => face.family.replaceAll('"', '')));
     expect(new Set(families)).toEqual(new Set(['Brygada 1918', 'Source Sans 3']));
     expect(new Set(fonts)).toEqual(new Set(['200 public, max-age=31536000, immutable']));
-    expect(await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth)).toBeLessThanOrEqual(0);
-    expect(findings).toEqual(clean);
-    await close();
   });
 });
 
 it('says what is missing when scripts are off', async () => {
-  const { page, close } = await openPage(browser, { javaScriptEnabled: false });
-  await page.goto('/cases');
-  expect(await page.locator('noscript').innerText()).toContain('switch it on for this address');
-  await close();
+  await visit(browser, { javaScriptEnabled: false }, async ({ page }) => {
+    await page.goto('/cases');
+    expect(await page.locator('noscript').innerText()).toContain('switch it on for this address');
+  });
 });
 
 it('can be put on a home screen', async () => {
@@ -50,9 +35,32 @@ it('can be put on a home screen', async () => {
 });
 
 it('keeps its list of routes to itself', async () => {
-  const { page, close } = await openPage(browser);
-  await page.goto('/_sitemap');
-  await page.getByRole('heading').first().waitFor();
-  expect(await page.locator('body').innerText()).not.toMatch(/sitemap/i);
-  await close();
+  await visit(browser, {}, async ({ page }) => {
+    await page.goto('/_sitemap');
+    await page.getByRole('heading').first().waitFor();
+    expect(await page.locator('body').innerText()).not.toMatch(/sitemap/i);
+  });
+});
+
+it('moves between places, back, and to an address of its own without loading the page again', async () => {
+  await visit(browser, {}, async ({ page }) => {
+    const title = (name?: string) => page.getByRole('heading', { level: 1, name }).first();
+    await page.goto('/help/glossary');
+    await title().waitFor();
+    const first = await title().innerText();
+    await page.evaluate(() => { document.body.dataset.sameLoad = 'yes'; });
+    for (const place of ['Relations', 'Quick look']) {
+      await page.getByRole('link', { name: place, exact: true }).first().click();
+      await title(place).waitFor();
+    }
+    await page.goBack();
+    await page.goBack();
+    await title(first).waitFor();
+    expect(new URL(page.url()).pathname).toBe('/help/glossary');
+    expect(await page.evaluate(() => document.body.dataset.sameLoad)).toBe('yes');
+    await page.reload();
+    await title(first).waitFor();
+    await page.goto('/leads/nowhere');
+    await title().waitFor();
+  });
 });

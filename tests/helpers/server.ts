@@ -18,6 +18,9 @@ import { makeDeps } from '@/server/start';
 import type { ProblemBody } from '@/shared/contracts/problem';
 import type { ProjectRole, SiteRole } from '@/shared/types/roles';
 import { freshDatabase, type FreshDatabase } from './database';
+import { PASSWORD } from './password';
+
+export { PASSWORD };
 
 /** The real algorithm at its lowest cost, in this process: the pool of threads has a test of its own. */
 const cheapPasswords: Passwords = {
@@ -26,8 +29,6 @@ const cheapPasswords: Passwords = {
   close: () => Promise.resolve(),
 };
 
-/** The password of everybody in the tests. */
-export const PASSWORD = 'seven bonds apart';
 
 export interface TestPerson {
   id: string;

@@ -1,0 +1,2 @@
+/** The password of everybody in the tests. */
+export const PASSWORD = 'seven bonds apart';
