@@ -2,6 +2,9 @@ import type { Browser, BrowserContext, CDPSession, Page } from 'playwright-core'
 
 const ARGS = ['--no-sandbox', '--disable-dev-shm-usage', '--disable-gpu', '--disable-background-networking', '--disable-component-update', '--disable-sync', '--disable-quic', '--no-first-run'];
 
+/** a busy machine takes its time; what is measured is measured elsewhere */
+const PATIENCE_MS = 120_000;
+
 export async function openBrowser(): Promise<Browser> {
   const { chromium } = await import('playwright-core');
   return chromium.launch({ executablePath: '/usr/bin/chromium', args: ARGS });
@@ -19,6 +22,7 @@ export interface Visit {
 export async function visit(browser: Browser, viewport = { width: 390, height: 844 }): Promise<Visit> {
   const context = await browser.newContext({ viewport, locale: 'en-GB', reducedMotion: 'reduce' });
   const page = await context.newPage();
+  page.setDefaultTimeout(PATIENCE_MS);
   const cdp = await context.newCDPSession(page);
   await cdp.send('Network.enable');
   const scripts = new Map<string, number>();

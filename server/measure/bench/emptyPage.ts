@@ -27,9 +27,12 @@ export async function buildEmptyPage(folder: string): Promise<string> {
     symlink(path.join(root, 'node_modules'), path.join(folder, 'node_modules'), 'dir'),
   ]);
   const output = path.join(folder, 'dist');
+  // a cache of its own: with node_modules shared, Metro would take parts of one project for those of the other
+  const cache = path.join(folder, 'cache');
+  await mkdir(cache);
   await run(process.execPath, [path.join(root, 'node_modules', 'expo', 'bin', 'cli'), 'export', '--platform', 'web', '--output-dir', output], {
     cwd: folder, maxBuffer: 16 * 1024 * 1024,
-    env: { ...process.env, NODE_ENV: 'production', CI: '1', EXPO_OFFLINE: '1', EXPO_NO_TELEMETRY: '1', EXPO_NO_DOTENV: '1' },
+    env: { ...process.env, TMPDIR: cache, NODE_ENV: 'production', CI: '1', EXPO_OFFLINE: '1', EXPO_NO_TELEMETRY: '1', EXPO_NO_DOTENV: '1' },
   });
   return output;
 }

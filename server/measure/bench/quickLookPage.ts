@@ -85,7 +85,7 @@ export async function visitEveryPart(page: Page): Promise<void> {
   await typeReading(page, '15.8');
   await page.locator(`[aria-label^="${startOf(quickText.ladderLabel('§', ''))}"]`).first().waitFor();
   await page.getByRole('button', { name: quickText.smiles }).click();
-  await page.getByLabel(quickText.smilesLabel).fill('CC=CC(=O)OC');
+  await page.getByRole('textbox', { name: quickText.smilesLabel }).fill('CC=CC(=O)OC');
   await page.getByRole('button', { name: quickText.smilesRead }).click();
   await page.waitForLoadState('networkidle');
   await page.keyboard.press('Escape');
