@@ -45,7 +45,8 @@ describe('what this device keeps', () => {
   });
 
   it('keeps a half-typed comment through a reload and through the end of the session', () => {
-    const first = renderHook(({ user }: { user: string | null }) => useKeptText(user, 'text.c1'), { initialProps: { user: 'anna' as string | null } });
+    const signedIn: string | null = 'anna';
+    const first = renderHook(({ user }: { user: string | null }) => useKeptText(user, 'text.c1'), { initialProps: { user: signedIn } });
     act(() => first.result.current.setText('half a sen'));
     first.rerender({ user: null });
     expect(first.result.current.text).toBe('half a sen');
