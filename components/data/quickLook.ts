@@ -10,7 +10,7 @@ import { unreadableProblem, type ApiProblem } from './problems';
 import { STALE } from './queryClient';
 
 /** Rest after the last key before the server is asked. */
-const DEBOUNCE_MS = 120;
+const DEBOUNCE_MS = 90;
 
 export const quickLookKeys = { one: (request: QuickLookRequest) => ['quick-look', request] as const };
 
@@ -24,8 +24,11 @@ function isAnswer(value: unknown): value is QuickLookResponse {
   return (state === 'answered' || state === 'question') && engineVersion === ENGINE_VERSION;
 }
 
+/** An answer with what was asked: a drawing must not take its groups from an entry that came later. */
+export interface LookedAt { request: QuickLookRequest; answer: QuickLookResponse }
+
 const quickLookOptions = (request: QuickLookRequest) =>
-  queryOptions<QuickLookResponse, ApiProblem>({
+  queryOptions<LookedAt, ApiProblem>({
     queryKey: quickLookKeys.one(request),
     // the same input gives the same answer, as long as the server has this engine
     staleTime: STALE.never,
@@ -34,7 +37,7 @@ const quickLookOptions = (request: QuickLookRequest) =>
     queryFn: async ({ signal }) => {
       const answer = await api.raw.post('/api/quick-look', request, { signal, timeoutMs: 8_000 });
       if (!isAnswer(answer)) throw unreadableProblem(apiText.olderPage);
-      return answer;
+      return { request, answer };
     },
   });
 
@@ -57,7 +60,7 @@ export function useQuickLook(request: QuickLookRequest | null) {
   const rested = useRested(request, DEBOUNCE_MS);
   const query = useQuery({ ...quickLookOptions(rested ?? { bond: 'single', j: '' }), enabled: rested !== null, placeholderData: keepPreviousData });
   const waiting = rested !== request || query.isPlaceholderData || query.isFetching;
-  return { answer: request === null ? undefined : query.data, problem: waiting ? null : query.error, waiting: request !== null && waiting, refetch: query.refetch };
+  return { looked: request === null ? undefined : query.data, problem: waiting ? null : query.error, waiting: request !== null && waiting, refetch: query.refetch };
 }
 
 /** Which C=C a SMILES holds, with the groups on both ends. */

@@ -1,5 +1,5 @@
 import { useQueryClient } from '@tanstack/react-query';
-import { Component, lazy, Suspense, useEffect, type ReactNode } from 'react';
+import { Component, lazy, memo, Suspense, useEffect, type ReactNode } from 'react';
 
 import { quickText } from '@/shared/text/quick';
 import { uiText } from '@/shared/text/ui';
@@ -29,13 +29,13 @@ export function usePlotsAhead(wanted: boolean): void {
   }, [wanted, client]);
 }
 
-export function LazyAnswerPlots(props: AnswerPlotsProps) {
+export const LazyAnswerPlots = memo(function LazyAnswerPlots(props: AnswerPlotsProps) {
   return (
     <PlotBoundary>
       <Suspense fallback={<PlotBox bond={props.answer.bond} note={quickText.plotsLoading} />}><Plots {...props} /></Suspense>
     </PlotBoundary>
   );
-}
+});
 
 export function LazyRelationCurve(props: RelationCurveProps) {
   return (

@@ -1,4 +1,4 @@
-import { useState } from 'react';
+import { memo, useState } from 'react';
 import { Pressable, StyleSheet, View } from 'react-native';
 
 import { quickText } from '@/shared/text/quick';
@@ -26,7 +26,7 @@ const LABELS = {
 } as const;
 
 /** The groups on both carbons of a C=C, the ring it may sit in, and the way from a SMILES. */
-export function DoubleBondCard({ form, set, say }: { form: Pick<QuickForm, 'left' | 'right' | 'ringSize'>; set: (change: Partial<QuickForm>) => void; say: SayOf }) {
+export const DoubleBondCard = memo(function DoubleBondCard({ form, set, say }: { form: Pick<QuickForm, 'left' | 'right' | 'ringSize'>; set: (change: Partial<QuickForm>) => void; say: SayOf }) {
   const [open, setOpen] = useState<Slot | 'ring' | 'smiles' | null>(null);
   const [wantsMore, setWantsMore] = useState(false);
   const four = wantsMore || form.left[1] !== 'H' || form.right[1] !== 'H';
@@ -73,7 +73,7 @@ export function DoubleBondCard({ form, set, say }: { form: Pick<QuickForm, 'left
       )}
     </Card>
   );
-}
+});
 
 /** CH = CH, the sign from the interface face, which has it at the right weight. */
 const BondWords = ({ four }: { four: boolean }) => <>{four ? 'C' : 'CH'}<Inline> = </Inline>{four ? 'C' : 'CH'}</>;

@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import { quickText } from '@/shared/text/quick';
@@ -14,7 +15,7 @@ import { RichText } from '../ui/RichText';
 import { Text } from '../ui/Text';
 
 /** What to measure or check, in order; numbered when the order matters. */
-export function Plan({ title, items, numbered = false }: { title: string; items: readonly NextMeasurement[]; numbered?: boolean }) {
+export const Plan = memo(function Plan({ title, items, numbered = false }: { title: string; items: readonly NextMeasurement[]; numbered?: boolean }) {
   if (items.length === 0) return null;
   return (
     <Card title={title} flush>
@@ -31,9 +32,9 @@ export function Plan({ title, items, numbered = false }: { title: string; items:
       </View>
     </Card>
   );
-}
+});
 
-export function Cautions({ cautions }: { cautions: readonly Caution[] }) {
+export const Cautions = memo(function Cautions({ cautions }: { cautions: readonly Caution[] }) {
   if (cautions.length === 0) return null;
   return (
     <Card title={quickText.cautions} flush>
@@ -47,9 +48,9 @@ export function Cautions({ cautions }: { cautions: readonly Caution[] }) {
       </View>
     </Card>
   );
-}
+});
 
-export function Sentences({ title, sentences }: { title: string; sentences: readonly string[] }) {
+export const Sentences = memo(function Sentences({ title, sentences }: { title: string; sentences: readonly string[] }) {
   if (sentences.length === 0) return null;
   return (
     <Card title={title} flush>
@@ -60,10 +61,10 @@ export function Sentences({ title, sentences }: { title: string; sentences: read
       </View>
     </Card>
   );
-}
+});
 
 /** The trail of one calculation: each step opens to its inputs, the relation with its numbers put in, and the source. */
-export function TrailFold({ steps }: { steps: readonly TrailStep[] }) {
+export const TrailFold = memo(function TrailFold({ steps }: { steps: readonly TrailStep[] }) {
   if (steps.length === 0) return null;
   return (
     <Card flush>
@@ -74,7 +75,7 @@ export function TrailFold({ steps }: { steps: readonly TrailStep[] }) {
       </Disclosure>
     </Card>
   );
-}
+});
 
 /** One step, in the ink of what it is. Used by the case's trail as well. */
 export function StepRow({ step, number, startOpen = false }: { step: TrailStep; number: number; startOpen?: boolean }) {

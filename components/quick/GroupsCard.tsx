@@ -1,4 +1,4 @@
-import { lazy, Suspense } from 'react';
+import { lazy, memo, Suspense } from 'react';
 
 import { hz } from '@/shared/format/number';
 import { quickText } from '@/shared/text/quick';
@@ -20,7 +20,7 @@ export type OpenPart = { part: 'groups'; slot?: Slot } | { part: 'turning' } | {
 const TURNINGS = ['free', 'ring', 'unknown'] as const;
 
 /** Groups, turning and relation of a single bond: three rows that open a sheet each. */
-export function GroupsCard({ form, set, say, relation, open, onOpen }: {
+export const GroupsCard = memo(function GroupsCard({ form, set, say, relation, open, onOpen }: {
   form: Pick<QuickForm, 'front' | 'rear' | 'turning' | 'relation'>; set: (change: Partial<QuickForm>) => void; say: SayOf; relation: RelationRef | null;
   open: OpenPart; onOpen: (part: OpenPart) => void;
 }) {
@@ -51,4 +51,4 @@ export function GroupsCard({ form, set, say, relation, open, onOpen }: {
       )}
     </Card>
   );
-}
+});

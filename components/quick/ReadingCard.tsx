@@ -1,3 +1,4 @@
+import { memo } from 'react';
 import { StyleSheet, View } from 'react-native';
 
 import type { FieldError } from '@/shared/contracts/problem';
@@ -33,7 +34,7 @@ export function sayings(errors: readonly FieldError[], notes: readonly InputNote
 const faultOf = ({ error, mends }: FieldSay): FieldSay => ({ error, mends });
 
 /** The measured J, its ±, and what is asked only now and then: the partner's splitting and the field. */
-export function ReadingCard({ form, set, say, askField }: { form: QuickForm; set: (change: Partial<QuickForm>) => void; say: SayOf; askField: boolean }) {
+export const ReadingCard = memo(function ReadingCard({ form, set, say, askField }: { form: QuickForm; set: (change: Partial<QuickForm>) => void; say: SayOf; askField: boolean }) {
   const unfolded = askField || form.partner !== '' || form.fieldMHz !== '' || say('partner').error !== undefined || say('fieldMHz').error !== undefined;
   // a sentence under a field needs the card's width, and so does a long number
   const wide = (field: 'j' | 'se') => say(field).error !== undefined || form[field].length > 6;
@@ -62,7 +63,7 @@ export function ReadingCard({ form, set, say, askField }: { form: QuickForm; set
       </Disclosure>
     </Card>
   );
-}
+});
 
 const styles = StyleSheet.create({
   body: { padding: space.lg, paddingTop: space.md, gap: space.sm },

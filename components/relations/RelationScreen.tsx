@@ -32,7 +32,7 @@ export function RelationScreen({ relationId }: { relationId: string }) {
   if (!data) {
     return (
       <Screen title={relationText.title} back="/relations">
-        <ScreenState kind="error" title={error!.body.title} hint={error!.detail} action={<Button label={uiText.tryAgain} busy={isFetching && uiText.loading} onPress={() => void refetch()} />} />
+        <ScreenState kind="error" title={error.body.title} hint={error.detail} action={<Button label={uiText.tryAgain} busy={isFetching && uiText.loading} onPress={() => void refetch()} />} />
       </Screen>
     );
   }

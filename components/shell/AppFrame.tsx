@@ -1,7 +1,7 @@
 import { QueryClientProvider } from '@tanstack/react-query';
 import { usePathname } from 'expo-router';
 import { Suspense, useEffect, useRef, useState, type ReactNode } from 'react';
-import { Pressable, StyleSheet, View } from 'react-native';
+import { StyleSheet, View } from 'react-native';
 
 import { uiText } from '@/shared/text/ui';
 
@@ -11,7 +11,7 @@ import { color, radius, space } from '../theme/tokens';
 import { ScreenCorner } from '../ui/screenCorner';
 import { ScreenState } from '../ui/ScreenState';
 import { Text } from '../ui/Text';
-import { asElement, web } from '../ui/webProps';
+import { asElement, web, type Click } from '../ui/webProps';
 import { Corner, Rail, Tabs } from './Navigation';
 import { Strips } from './Strips';
 
@@ -56,10 +56,15 @@ function Frame({ children }: { children: ReactNode }) {
 
 function SkipLink({ onPress }: { onPress: () => void }) {
   const [seen, setSeen] = useState(false);
+  // the address is the router's: the focus moves, the address does not
+  const skip = (event: Click) => {
+    event.preventDefault();
+    onPress();
+  };
   return (
-    <Pressable role="link" onPress={onPress} onFocus={() => setSeen(true)} onBlur={() => setSeen(false)} style={[styles.skip, !seen && styles.away]}>
+    <View {...web({ href: '#main', onClick: skip, onFocus: () => setSeen(true), onBlur: () => setSeen(false) })} style={[styles.skip, !seen && styles.away]}>
       <Text kind="strong" tone="onInk">{uiText.skipToContent}</Text>
-    </Pressable>
+    </View>
   );
 }
 

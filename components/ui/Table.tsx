@@ -29,7 +29,7 @@ export function Table<Row>({ caption, columns, rows, rowKey, rowTone }: {
   rowTone?: (row: Row) => 'plain' | 'chosen' | 'query' | 'outlier';
 }) {
   const [frame, scrolls] = useScrolls();
-  const named = scrolls ? { tabIndex: 0, role: 'region', 'aria-label': plainText(caption) } : {};
+  const named = scrolls ? { tabIndex: 0, role: 'group', 'aria-label': plainText(caption) } : {};
   return (
     <div ref={frame} style={frameStyle} {...named}>
         <table style={table}>

@@ -25,6 +25,8 @@ export interface WebProps {
   href?: string;
   onKeyDown?: (event: KeyPress) => void;
   onClick?: (event: Click) => void;
+  onFocus?: () => void;
+  onBlur?: () => void;
 }
 /** What our handlers use of the page's own events. */
 export interface KeyPress { key: string; shiftKey: boolean; ctrlKey: boolean; metaKey: boolean; altKey: boolean; preventDefault: () => void; stopPropagation: () => void }
