@@ -45,8 +45,7 @@ describe('what this device keeps', () => {
   });
 
   it('keeps a half-typed comment through a reload and through the end of the session', () => {
-    const signedIn: string | null = 'anna';
-    const first = renderHook(({ user }: { user: string | null }) => useKeptText(user, 'text.c1'), { initialProps: { user: signedIn } });
+    const first = renderHook<ReturnType<typeof useKeptText>, { user: string | null }>(({ user }) => useKeptText(user, 'text.c1'), { initialProps: { user: 'anna' } });
     act(() => first.result.current.setText('half a sen'));
     first.rerender({ user: null });
     expect(first.result.current.text).toBe('half a sen');
