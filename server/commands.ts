@@ -3,6 +3,7 @@ import { parseArgs } from 'node:util';
 import { createAdministrator } from './auth/firstAdministrator';
 import type { Passwords } from './auth/passwords';
 import { migrate } from './db/migrator';
+import { reaching } from './db/sequelize';
 import { neededDatabaseUrl, SettingError, type Env } from './env';
 import type { Log } from './http/log';
 import { checkSchema, makeDeps, serve, stopDeps } from './start';
@@ -36,7 +37,7 @@ async function serveUntilStopped({ env, log, passwords }: Setting): Promise<void
 
 async function runMigrate({ env, passwords }: Setting): Promise<void> {
   const owner = env.databaseOwnerUrl ?? neededDatabaseUrl(env);
-  const { ran, separateUser } = await migrate({ owner, app: env.databaseUrl });
+  const { ran, separateUser } = await reaching(owner, () => migrate({ owner, app: env.databaseUrl }));
   say(ran.length === 0 ? 'The database schema is current.' : `The database schema is current; ${ran.length} migrations ran.`);
   if (!separateUser) say('One database user owns and uses the tables, so a signed case is guarded by triggers alone; set DATABASE_OWNER_URL to a user of its own for the full guard.');
   await passwords.close();

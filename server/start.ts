@@ -11,7 +11,7 @@ import { sessionSecret } from './auth/sessionSecret';
 import { createThrottle } from './auth/throttle';
 import { defineModels } from './db/models';
 import { missingMigrations } from './db/migrator';
-import { openDatabase } from './db/sequelize';
+import { openDatabase, reaching } from './db/sequelize';
 import type { Deps } from './deps';
 import { neededDatabaseUrl, SettingError, type Env } from './env';
 import type { Log } from './http/log';
@@ -48,7 +48,7 @@ export async function stopDeps({ sessions, mail, passwords, db, log }: Deps): Pr
 
 /** @throws SettingError in one sentence when the schema is older than this server */
 export async function checkSchema(deps: Deps): Promise<void> {
-  const missing = await missingMigrations(deps.db);
+  const missing = await reaching(neededDatabaseUrl(deps.env), () => missingMigrations(deps.db));
   const [first, ...more] = missing;
   if (first === undefined) return;
   const others = more.length === 0 ? '' : ` and ${more.length} more`;

@@ -1,4 +1,6 @@
-import { Sequelize } from 'sequelize';
+import { ConnectionError, Sequelize } from 'sequelize';
+
+import { SettingError } from '@/server/env';
 
 const TABLE_OPTIONS = { underscored: true, charset: 'utf8mb4', collate: 'utf8mb4_unicode_520_ci' } as const;
 
@@ -27,4 +29,16 @@ export function openDatabase(url: string, poolSize = 10): Sequelize {
     pool: { max: poolSize, min: Math.min(1, poolSize - 1), acquire: 10_000, idle: 30_000 },
     define: TABLE_OPTIONS,
   });
+}
+
+/** Runs the first work on a database. @throws SettingError in one sentence, without the password, when it cannot be reached at all */
+export async function reaching<T>(url: string, work: () => Promise<T>): Promise<T> {
+  try {
+    return await work();
+  } catch (error) {
+    if (!(error instanceof ConnectionError)) throw error;
+    const { user, host, port, database } = databaseParts(url);
+    const code = (error.parent as Error & { code?: string }).code ?? error.name;
+    throw new SettingError(`The database ${database} at ${host}:${port} does not let ${user} in (${code}); check its address, user and password.`);
+  }
 }
