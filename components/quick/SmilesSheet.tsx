@@ -11,16 +11,18 @@ import { Field } from '../ui/Field';
 import { RadioRow, RadioRows } from '../ui/Choice';
 import { RichText } from '../ui/RichText';
 import { Sheet } from '../ui/Sheet';
-import type { QuickForm } from './form';
+import type { GroupPair, QuickForm } from './form';
 import { groupLine } from './groupWords';
 
 type Found = Pick<QuickForm, 'left' | 'right' | 'ringSize'>;
+/** The card shows the first group of each carbon and folds an H away as the second. */
+const hydrogenLast = ([a, b]: GroupPair): GroupPair => (a === 'H' ? [b, a] : [a, b]);
 
 /** Groups on a C=C out of a pasted SMILES; one double bond is taken at once, of several one is chosen. */
 export function SmilesSheet({ onUse, onClose }: { onUse: (found: Found) => void; onClose: () => void }) {
   const [smiles, setSmiles] = useState('');
   const find = useDoubleBonds();
-  const toForm = (bond: NonNullable<typeof find.data>['bonds'][number]): Found => ({ left: bond.groups.left, right: bond.groups.right, ringSize: bond.ringSize });
+  const toForm = (bond: NonNullable<typeof find.data>['bonds'][number]): Found => ({ left: hydrogenLast(bond.groups.left), right: hydrogenLast(bond.groups.right), ringSize: bond.ringSize });
   const read = () => {
     if (smiles.trim() === '') return;
     find.mutate(smiles.trim(), {

@@ -52,7 +52,7 @@ export const quickText = {
   pickFor: (slot: string) => `Group: ${slot}`,
   doubleGroups: 'Groups on the bond',
   moreGroups: 'Three or four groups',
-  twoGroups: 'One group on each carbon',
+  twoGroups: 'One group a carbon',
   ring: 'Ring',
   ringNone: 'not in a ring',
   ringSize: (size: number) => (size === 8 ? '8-membered or larger' : `${size}-membered ring`),
