@@ -7,7 +7,7 @@ import { uiCases } from '@/shared/text/uiCases';
 import { roleWords, uiTeam } from '@/shared/text/uiTeam';
 import { uiText } from '@/shared/text/ui';
 import { openBrowser, PHONE, until, visit, WIDE } from '../helpers/browser';
-import { draft, ok } from '../helpers/caseWork';
+import { draft } from '../helpers/caseWork';
 import { callerOf, makePerson, makeScene, openAs, sql, visitAs } from '../helpers/people';
 import { PASSWORD } from '../helpers/password';
 

@@ -64,7 +64,7 @@ export async function openPage(browser: Browser, { address = product().address, 
   // the browser itself writes a line for each answer from 400: those answers have lists of their own
   const isOwnList = (text: string) => /^Failed to load resource: the server responded with a status of/.test(text) || (!network && /^Failed to load resource: net::ERR_INTERNET_DISCONNECTED/.test(text));
   await context.addInitScript(() => {
-    document.addEventListener('securitypolicyviolation', (event) => console.error(`policy ${event.violatedDirective} refused ${event.blockedURI}`));
+    document.addEventListener('securitypolicyviolation', (event) => reportError(new Error(`The policy ${event.violatedDirective} refused ${event.blockedURI}`)));
   });
   context.on('console', (message) => {
     if (message.type() === 'error' && !isOwnList(message.text())) findings.errors.push(message.text());
