@@ -17,7 +17,7 @@ import { neededDatabaseUrl, SettingError, type Env } from './env';
 import type { Log } from './http/log';
 import { countWaiting } from './features/reviews/read';
 import { keepLetter } from './mail/mailbox';
-import { relationRegistry } from './relations/registry';
+import { relationRegistry, verifyRelations } from './relations/registry';
 import { createMailer, localSender, smtpSender } from './mail/mailer';
 
 /** Everything the server works with, from its settings; nothing listens yet. A test hands in a clock that it can move. */
@@ -81,6 +81,12 @@ export async function serve(env: Env, log: Log, passwords: Passwords): Promise<R
     const server = createServer(createApp(deps, { distDir: built ? env.distDir : null }));
     const port = await listen(server, env.port);
     log.info('listening', { port });
+    // The rows cannot change while it runs, so their formulas may be verified after the port is open; a slip ends the server.
+    verifyRelations(deps.relations).catch((error: unknown) => {
+      log.error('relations-differ', { error });
+      process.kill(process.pid, 'SIGTERM');
+      process.exitCode = 1;
+    });
     return { port, stop: () => stopServing(server, deps) };
   } catch (error) {
     await stopDeps(deps); // an open pool would keep a failed start alive

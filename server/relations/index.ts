@@ -14,7 +14,7 @@ async function load(): Promise<HeldRelations> {
   return { registry, summaries: registry.rows.map(relationSummary) };
 }
 
-/** The relations the product runs on: read, verified and summed up once. A row with a slip rejects, and start stops with its name. */
+/** The relations the product runs on: read and summed up once. A row with a slip rejects, and start stops with its name. */
 export function heldRelations(): Promise<HeldRelations> {
   held ??= load();
   return held;

@@ -1,11 +1,18 @@
-import { all, create } from 'mathjs';
-
 import { effectiveDchi } from '@/shared/engine/relations/generalised';
 import { bindCurve, jAt } from '@/shared/engine/relations/curve';
 import { studentDensity } from '@/shared/engine/math/student';
 import type { AngleRow, ParameterSet, RelationRow, Substituent } from '@/shared/types/relation';
 
-const math = create(all ?? {});
+/** One loading of mathjs, and only where a printed formula is evaluated: it takes about a second, which no start should wait for. */
+async function evaluator(): Promise<(formula: string) => (numbers: Record<string, number | number[]>) => unknown> {
+  const { all, create } = await import('mathjs');
+  const math = create(all ?? {});
+  return (formula) => {
+    const compiled = math.compile(formula);
+    return (numbers) => compiled.evaluate(numbers) as unknown;
+  };
+}
+
 const RADIANS = Math.PI / 180;
 
 /** Substituents on which the printed generalised equation is tried: none, one of each kind, four mixed. */
@@ -29,8 +36,8 @@ function scope(row: RelationRow, set: ParameterSet, phiDeg: number, substituents
 }
 
 /** J by the printed formula, evaluated by mathjs from its text alone. */
-export function printedValue(row: AngleRow, set: ParameterSet, phiDeg: number, substituents: readonly Substituent[] = []): number {
-  const value: unknown = math.evaluate(row.mathFormula, scope(row, set, phiDeg, substituents));
+export async function printedValue(row: AngleRow, set: ParameterSet, phiDeg: number, substituents: readonly Substituent[] = []): Promise<number> {
+  const value = (await evaluator())(row.mathFormula)(scope(row, set, phiDeg, substituents));
   if (typeof value !== 'number') throw new Error(`${row.id}: the printed formula gives no number`);
   return value;
 }
@@ -39,10 +46,11 @@ export function printedValue(row: AngleRow, set: ParameterSet, phiDeg: number, s
  * Compares the printed formula with the function that calculates, at sample angles, sets and substituents.
  * @throws Error naming row, set and angle where they differ by more than 1e-9 Hz
  */
-export function verifyPrintedFormula(row: RelationRow): void {
+export async function verifyPrintedFormula(row: RelationRow): Promise<void> {
+  const printedAt = (await evaluator())(row.mathFormula);
   if (row.kind === 'class-table') {
     for (const [J, m, s, nu] of [[15.8, 15.5, 0.9, 8], [10.9, 11.2, 1, 5], [20, 11, 1.5, 7]] as const) {
-      const printed: unknown = math.evaluate(row.mathFormula, { J, m, s, nu });
+      const printed = printedAt({ J, m, s, nu });
       const own = studentDensity(J, m, s, nu);
       if (typeof printed !== 'number' || Math.abs(printed - own) > 1e-12) throw new Error(`${row.id}@${row.version}: the printed density gives ${String(printed)}, the engine ${own}`);
     }
@@ -52,10 +60,10 @@ export function verifyPrintedFormula(row: RelationRow): void {
     for (const substituents of row.kind === 'generalised' ? TRIALS : [[]]) {
       const curve = bindCurve(row, { substituents, set: set.id });
       for (const phiDeg of ANGLES) {
-        const printed = printedValue(row, set, phiDeg, substituents);
+        const printed = printedAt(scope(row, set, phiDeg, substituents));
         const own = jAt(curve, phiDeg);
-        if (!(Math.abs(printed - own) <= 1e-9)) {
-          throw new Error(`${row.id}@${row.version}, set ${set.id || 'only'}, ${phiDeg}°: the printed formula gives ${printed}, the engine ${own}`);
+        if (typeof printed !== 'number' || !(Math.abs(printed - own) <= 1e-9)) {
+          throw new Error(`${row.id}@${row.version}, set ${set.id || 'only'}, ${phiDeg}°: the printed formula gives ${String(printed)}, the engine ${own}`);
         }
       }
     }

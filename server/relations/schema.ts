@@ -45,7 +45,7 @@ export const relationRow = z.discriminatedUnion('kind', [
       name: text, left: z.tuple([group, group]), right: z.tuple([group, group]), cisHz: hz.nullable(), transHz: hz.nullable(),
       geminalHz: hz.nonnegative().nullable(), doubtful: z.boolean(), provenance, source: text, note: text.optional(),
     })).min(1),
-    rings: z.array(z.strictObject({ ringSize: z.int().min(3).max(8), parent: sourced, rangeHz: range, source: text, provenance, others: z.array(sourced) })).min(1),
+    rings: z.array(z.strictObject({ ringSize: z.int().min(3).max(8), parent: sourced, rangeHz: range, source: text, provenance, others: z.array(sourced.extend({ bears: z.enum(['hetero', 'conjugated']) })) })).min(1),
     carbonCouplings: z.array(z.strictObject({ geometry: z.enum(['cis', 'trans']), jHz: hz, name: text, provenance, source: text })).min(1),
   }),
 ]);

@@ -42,6 +42,7 @@ export const casesText = {
     readOnly: (state: CaseState) => state === 'in-review'
       ? 'In review the content stays as it was sent. The author may reopen it as a draft.'
       : state === 'signed' ? 'A signed case is not changed. Add an addendum, or supersede it.' : `The case is ${stateWord[state]} and stays as it is.`,
+    holderAsks: 'You hold this review: ask in a query, or give the case back before you change it.',
     closed: (state: CaseState) => `The case is ${stateWord[state]} and stays as it is.`,
     authorSubmits: 'The author sends the case to review.',
     alreadySent: (state: CaseState) => state === 'in-review' ? 'The case is in review already.' : `The case is ${stateWord[state]}.`,

@@ -135,7 +135,7 @@ export interface RingAlkene {
   source: string;
   provenance: Provenance;
   /** rings with O, N or C=O in or beside the CH=CH, and other compounds held */
-  others: SourcedHz[];
+  others: (SourcedHz & { bears: 'hetero' | 'conjugated' })[];
 }
 
 /** ³J(C,H) across C=C, for bonds without a vicinal H,H pair. */

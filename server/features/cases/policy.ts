@@ -67,9 +67,15 @@ function holder(facts: CaseFacts, role: ProjectRole): Refusal | null {
   return facts.isHolder ? null : standing(words.takeFirst);
 }
 
+/** May the content be changed? Whoever holds the review would lose it by a save, so the holder asks instead. */
+function open(facts: CaseFacts): Refusal | null {
+  if (facts.state !== 'draft' && facts.state !== 'queried') return standing(words.readOnly(facts.state));
+  return facts.state === 'queried' && facts.isHolder ? person(words.holderAsks) : null;
+}
+
 const RULES: Record<CaseAct, (facts: CaseFacts, role: ProjectRole) => Refusal | null> = {
-  edit: (facts) => (facts.state === 'draft' || facts.state === 'queried' ? null : standing(words.readOnly(facts.state))),
-  attach: (facts) => (facts.state === 'draft' || facts.state === 'queried' ? null : standing(words.readOnly(facts.state))),
+  edit: open,
+  attach: open,
   comment: (facts) => (facts.state === 'superseded' || facts.state === 'withdrawn' ? standing(words.closed(facts.state)) : null),
   submit: (facts) => {
     if (!facts.isAuthor) return person(words.authorSubmits);

@@ -87,10 +87,10 @@ export function judgeRing(context: DoubleContext): DoubleVerdict {
     return { ...open, detail: `${say.ringLarge(j)}. ${say.ringDetail(ring.parent.name, ring.parent.jHz, ring.rangeHz)}`, finding: { ...open.finding, setting: 'ring' } };
   }
   const slack = 2 * reading.seHz;
-  // hetero atoms on the bond: the compounds of that ring size that bear them widen what is known
+  // a hetero atom or a conjugated group on the bond: the compounds of that ring size that bear the same widen what is known
   const hetero = kind?.elements.some((e) => e !== 'C') ?? false;
   const conjugated = [...(context.groups?.left ?? []), ...(context.groups?.right ?? [])].some((g) => g.neighbours?.some((n) => n.order > 1));
-  const held = hetero || conjugated ? compounds.map((c) => c.jHz) : [];
+  const held = ring.others.filter((c) => (c.bears === 'hetero' ? hetero : conjugated)).map((c) => c.jHz);
   const low = Math.min(ring.rangeHz[0], ...held);
   const high = Math.max(ring.rangeHz[1], ...held);
   const fits =

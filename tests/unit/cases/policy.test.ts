@@ -29,9 +29,9 @@ const OTHER: Record<ProjectRole, Row> = {
 };
 const HOLDER: Record<ProjectRole, Row> = {
   reader: { ...none, release: 'rq' },
-  chemist: { ...OTHER.chemist, release: 'rq' },
-  reviewer: { ...OTHER.reviewer, release: 'rq', check: 'rq', query: 'rq', answerQuery: 'rq', sign: 'r' },
-  lead: { ...OTHER.lead, release: 'rq', check: 'rq', query: 'rq', answerQuery: 'rq', sign: 'r' },
+  chemist: { ...OTHER.chemist, edit: 'd', attach: 'd', release: 'rq' },
+  reviewer: { ...OTHER.reviewer, edit: 'd', attach: 'd', release: 'rq', check: 'rq', query: 'rq', answerQuery: 'rq', sign: 'r' },
+  lead: { ...OTHER.lead, edit: 'd', attach: 'd', release: 'rq', check: 'rq', query: 'rq', answerQuery: 'rq', sign: 'r' },
 };
 
 const answered = { answeredQueries: [1] };
@@ -59,6 +59,12 @@ describe.each(PROJECT_ROLES)('a %s', (role) => {
 });
 
 describe('what else an act hangs on', () => {
+  it('keeps whoever holds the review from changing what is reviewed', () => {
+    for (const act of ['edit', 'attach'] as const) {
+      expect(refusal(act, facts({ role: 'lead', state: 'queried', isHolder: true }))?.kind).toBe('not-allowed');
+      expect(refusal(act, facts({ role: 'lead', state: 'queried' }))).toBeNull();
+    }
+  });
   const review = { role: 'reviewer', state: 'in-review', isHolder: true } as const;
   it('lets chemists review each other where the project says so', () => {
     expect(allowedIn('claim', { role: 'chemist', peerReview: true })).toBe('rq');

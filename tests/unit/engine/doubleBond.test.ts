@@ -158,6 +158,8 @@ describe('rings', () => {
     expect(said(a)).toBe('not-decided none');
     expect(a.checkFirst.length).toBeGreaterThan(0);
   });
+  it('of an enone with carbon groups only are not held against rings that bear oxygen', () =>
+    expect(answer('5.7', 'C(=O,C)', 'C(C,H,H)', { ringSize: 6 }).grade).toBe('not-decided'));
   it('with O or C=O at the bond are compared with such rings too', () => expect(answer('6.0', 'O(C)', 'C(C,H,H)', { ringSize: 6 }).grade).toBe('assigned'));
   it('of eight and more can be trans, tentative at most', () => {
     const a = answer('15.6', 'C(C,H,H)', 'C(C,H,H)', { ringSize: 8 });

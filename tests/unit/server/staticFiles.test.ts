@@ -11,10 +11,12 @@ import { problemBody } from '@/shared/contracts/problem';
 const CHUNK = `/_expo/static/js/web/entry-${'0a'.repeat(16)}.js`;
 const SCRIPT = 'export const sign = 1;\n'.repeat(100);
 /** Reads an answer as it came over the wire, so that its coding can be looked at. */
-const asText = (response: NodeJS.ReadableStream, done: (error: Error | null, body: string) => void): void => {
+const asText = (response: request.Response, done: (error: Error | null, body: unknown) => void): void => {
   let text = '';
-  response.on('data', (part: Buffer) => { text += part.toString(); });
-  response.on('end', () => { done(null, text); });
+  // supertest hands the stream of the answer under the type of the finished answer
+  const stream = response as unknown as NodeJS.ReadableStream;
+  stream.on('data', (part: Buffer) => { text += part.toString(); });
+  stream.on('end', () => { done(null, text); });
 };
 let folder: string;
 let app: express.Express;
