@@ -1,11 +1,11 @@
 import { Slot } from 'expo-router';
 
 import { AppFrame } from '@/components/shell/AppFrame';
-import { applyTheme } from '@/components/theme/theme';
+import { followTheme } from '@/components/theme/theme';
 
 export { LastBoundary as ErrorBoundary } from '@/components/shell/LastBoundary';
 
-applyTheme();
+followTheme();
 
 export default function Layout() {
   return <AppFrame><Slot /></AppFrame>;

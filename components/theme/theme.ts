@@ -23,7 +23,7 @@ export const currentScheme = (): Scheme => {
   return choice === 'system' ? (darkQuery()?.matches ? 'dark' : 'light') : choice;
 };
 
-/** Writes the palette to the document; called before the first paint and at every change. */
+/** Writes the palette to the document. */
 export function applyTheme(): void {
   const scheme = currentScheme();
   const root = document.documentElement;
@@ -41,16 +41,16 @@ function changed() {
   listeners.forEach((tell) => tell());
 }
 
+/** Applies the theme and goes on following the system and the other tabs, on every screen. Called once, before the first paint. */
+export function followTheme(): void {
+  applyTheme();
+  darkQuery()?.addEventListener('change', changed);
+  window.addEventListener('storage', changed);
+}
+
 function subscribe(tell: () => void) {
   listeners.add(tell);
-  const query = darkQuery();
-  query?.addEventListener('change', changed);
-  window.addEventListener('storage', changed);
-  return () => {
-    listeners.delete(tell);
-    query?.removeEventListener('change', changed);
-    window.removeEventListener('storage', changed);
-  };
+  return () => { listeners.delete(tell); };
 }
 
 export function setThemeChoice(choice: ThemeChoice): void {
