@@ -8,7 +8,7 @@ import { uiTeam } from '@/shared/text/uiTeam';
 import { uiText } from '@/shared/text/ui';
 import { CASE_STATES, type CaseState } from '@/shared/types/case';
 import type { ProjectResponse, TeamResponse } from '@/shared/contracts/team';
-import { axeFindings, CLEAN, openBrowser, openPage, overflowing, PHONE, until, WIDTHS, type OpenPage, type PageOptions } from '../helpers/browser';
+import { axeFindings, CLEAN, openBrowser, openPage, overflowing, PHONE, until, WIDE, WIDTHS, type OpenPage, type PageOptions } from '../helpers/browser';
 import { ok } from '../helpers/caseWork';
 import { demoPerson, makeScene, openAs, sql, type SignedInPage } from '../helpers/people';
 
@@ -98,12 +98,15 @@ async function looksRight({ page, findings }: OpenPage, [, path, heading, title]
   expect(await page.title()).toBe(`${title?.() ?? shown} · ${uiText.product}`);
   expect(await page.getByText(/NaN|undefined|\[object/).count()).toBe(0);
   await fitsInWidth(page);
+  // a tall window: axe reads what can be seen, and the screens scroll within themselves
+  await page.setViewportSize({ width, height: 3200 });
   expect({ light: await axeFindings(page) }).toEqual({ light: [] });
   await page.emulateMedia({ colorScheme: 'dark' });
   await page.locator('html[data-theme="dark"]').waitFor();
   expect({ dark: await axeFindings(page) }).toEqual({ dark: [] });
   await page.emulateMedia({ colorScheme: 'light' });
   await page.locator('html[data-theme="light"]').waitFor();
+  await page.setViewportSize(width === PHONE.width ? PHONE : WIDE);
   if (width === PHONE.width) {
     await page.setViewportSize({ width: 320, height: 640 });
     await fitsInWidth(page);
