@@ -10,7 +10,7 @@ import { unreadableProblem, type ApiProblem } from './problems';
 import { STALE } from './queryClient';
 
 /** Rest after the last key before the server is asked. */
-const DEBOUNCE_MS = 90;
+const DEBOUNCE_MS = 60;
 
 export const quickLookKeys = { one: (request: QuickLookRequest) => ['quick-look', request] as const };
 

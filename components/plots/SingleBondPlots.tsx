@@ -25,7 +25,7 @@ import { useTurn } from './useTurn';
 import { useWidth } from './useWidth';
 import { arcsWords, rootsWords, sectorsShort } from './words';
 
-interface Props extends Pick<AnswerPlotsProps, 'groups' | 'onPickGroup'> { finding: SingleBondFinding; relation: RelationRef; reading: HzReading }
+interface Props extends Pick<AnswerPlotsProps, 'groups' | 'onPickGroup' | 'beside'> { finding: SingleBondFinding; relation: RelationRef; reading: HzReading }
 
 const NO_GROUPS = {};
 /** The angle shown first: the last root (towards ap), else the middle of the widest arc, else 180°. */
@@ -37,7 +37,7 @@ function startAngle(finding: SingleBondFinding): number {
 }
 
 /** Dial and curve of a single bond, turning together. */
-export function SingleBondPlots({ finding, relation, reading, groups, onPickGroup }: Props) {
+export function SingleBondPlots({ finding, relation, reading, groups, onPickGroup, beside = false }: Props) {
   const inputs = useMemo(() => (groups ? { groups } : NO_GROUPS), [groups]);
   const { curve, isPending } = useDeviceCurve(`${relation.id}@${relation.version}`, inputs);
   const start = startAngle(finding);
@@ -48,8 +48,10 @@ export function SingleBondPlots({ finding, relation, reading, groups, onPickGrou
   const turn = { phiDeg, jHz, set, turnTo };
   return (
     <Card flush>
-      <DialPart finding={finding} groups={groups} onPickGroup={onPickGroup} turn={turn} />
-      <CurvePart finding={finding} relation={relation} reading={reading} curve={curve} turn={turn} />
+      <View style={beside && styles.beside}>
+        <View style={beside && styles.narrow}><DialPart finding={finding} groups={groups} onPickGroup={onPickGroup} turn={turn} /></View>
+        <View style={[styles.ruled, beside && styles.broad]}><CurvePart finding={finding} relation={relation} reading={reading} curve={curve} turn={turn} /></View>
+      </View>
       <Disclosure label={finding.roots.length + finding.arcs.length > 0 ? quickText.curveTable : quickText.relationTable} openLabel={quickText.hideTable}>
         <Twin finding={finding} curve={curve} spreadHz={relation.spreadHz} />
       </Disclosure>
@@ -137,6 +139,11 @@ const styles = StyleSheet.create({
   turning: { flexDirection: 'row', alignItems: 'center', justifyContent: 'center', gap: space.md },
   value: { minWidth: 150 },
   roots: { flexDirection: 'row', flexWrap: 'wrap', justifyContent: 'center', gap: space.sm, paddingBottom: space.xs },
-  curve: { paddingHorizontal: space.lg, paddingVertical: space.md, gap: space.sm, borderTopWidth: border.hair, borderTopColor: color.ruleSoft },
+  curve: { paddingHorizontal: space.lg, paddingVertical: space.md, gap: space.sm },
+  ruled: { borderTopWidth: border.hair, borderTopColor: color.ruleSoft },
+  // wraps to one below the other where the two do not fit
+  beside: { flexDirection: 'row', flexWrap: 'wrap' },
+  narrow: { flexGrow: 1, flexBasis: 232 },
+  broad: { flexGrow: 2, flexBasis: 300, borderTopWidth: 0 },
   tables: { gap: space.lg, paddingBottom: space.md },
 });

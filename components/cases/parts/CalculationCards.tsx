@@ -20,6 +20,7 @@ import { Notice } from '../../ui/Notice';
 import { RichText } from '../../ui/RichText';
 import { ScreenState } from '../../ui/ScreenState';
 import { useCaseView } from '../caseContext';
+import { groupsOf } from '../logic/groupsOf';
 import { applyMend } from '../logic/mends';
 import { same } from '../logic/versions';
 
@@ -57,6 +58,7 @@ function CalculationCard({ calculation, startOpen }: { calculation: Calculation;
   return (
     <Card title={name} mark={<Mark ink="calculated" size={16} />} aside={aside} flush>
       <CardBody gap="md">
+        <RichText kind="small" tone="muted" text={groupsOf(calculation)} />
         {isPending && <RichText tone="muted" text={say.pending} />}
         {!isPending && result?.state === 'answered' && <Finding answer={result} />}
         {!isPending && result?.state === 'question' && (
@@ -73,7 +75,7 @@ function CalculationCard({ calculation, startOpen }: { calculation: Calculation;
       </CardBody>
       {!isPending && result?.state === 'answered' && (result.single !== null || (result.double !== null && result.double.ladder.length > 0)) && (
         <Disclosure label={say.open} openLabel={say.hide} startOpen={startOpen}>
-          <View style={styles.plots}><LazyAnswerPlots answer={result} groups={calculation.bond === 'single' ? calculation.groups ?? null : null} /></View>
+          <View style={styles.plots}><LazyAnswerPlots beside answer={result} groups={calculation.bond === 'single' ? calculation.groups ?? null : null} /></View>
         </Disclosure>
       )}
     </Card>
