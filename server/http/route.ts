@@ -160,7 +160,8 @@ function run(one: Route, checkTrusted: boolean) {
     if (!answerSchema || response.headersSent) return; // a file wrote itself
     const body = check ? answerSchema.parse(answer) : answer;
     if (response.statusCode === 200) response.status(one.status); // unless the handler knew better
-    response.type('application/json').send(JSON.stringify(body));
+    response.setHeader('Content-Type', 'application/json; charset=utf-8');
+    response.end(JSON.stringify(body));
   };
 }
 

@@ -1,3 +1,5 @@
+import { IncomingMessage, ServerResponse } from 'node:http';
+import { Socket } from 'node:net';
 import type { RequestHandler } from 'express';
 import helmet from 'helmet';
 
@@ -22,7 +24,7 @@ const POLICY = {
 };
 
 /**
- * The headers of every answer.
+ * The headers of every answer. None depends on the request, so helmet makes them once and not at each key press.
  * @param options.behindTls people reach the server by https (set by its public address): only then may a browser be
  *   told to insist on it
  */
@@ -33,8 +35,14 @@ export function securityHeaders({ behindTls }: { behindTls: boolean }): RequestH
     strictTransportSecurity: behindTls ? { maxAge: 365 * 24 * 3600, includeSubDomains: false } : false,
     xFrameOptions: { action: 'deny' },
   });
-  return (request, response, next) => {
-    response.setHeader('Permissions-Policy', 'camera=(), geolocation=(), microphone=(), payment=(), usb=()');
-    shield(request, response, next);
+  const headers: [string, string][] = [['Permissions-Policy', 'camera=(), geolocation=(), microphone=(), payment=(), usb=()']];
+  let whole = false;
+  const recorder = new ServerResponse(new IncomingMessage(new Socket()));
+  shield(recorder.req, recorder, (fault?: unknown) => { whole = fault === undefined; });
+  if (!whole) throw new Error('The security headers could not be made.');
+  for (const [name, value] of Object.entries(recorder.getHeaders())) headers.push([name, String(value)]);
+  return (_request, response, next) => {
+    for (const [name, value] of headers) response.setHeader(name, value);
+    next();
   };
 }

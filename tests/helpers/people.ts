@@ -26,7 +26,7 @@ const passwordHash = () => (hash ??= bcrypt.hash(prepared(PASSWORD), 4));
 /** An account of its own for one test; the name is given, the address is made unlike any other. */
 export async function makePerson(name: string, more: { siteRole?: SiteRole } = {}, url?: string): Promise<Person> {
   const id = randomUUID();
-  const email = `${name.toLowerCase().replace(/[^a-z]+/g, '.')}.${randomBytes(3).toString('hex')}@e2e.example`;
+  const email = `${name.toLowerCase().replace(/[^a-z0-9]+/g, '.')}.${randomBytes(3).toString('hex')}@e2e.example`;
   await sql('INSERT INTO users (id, email, name, password_hash, site_role, created_at, updated_at) VALUES (?, ?, ?, ?, ?, NOW(3), NOW(3))', [id, email, name, await passwordHash(), more.siteRole ?? 'member'], url);
   return { id, name, email, password: PASSWORD };
 }

@@ -34,12 +34,13 @@ export async function firstAnswer(): Promise<Figure[]> {
   }
 }
 
-/** A page with an empty cache, where the parts behind the answer have to come over the wire first. */
+/** A page with an empty cache, loaded and at rest as it is for whoever reads it first; the parts behind the answer still have to come over the wire. */
 async function onColdPage(browser: Browser, url: string, measure: typeof typedToPainted): Promise<number> {
   const { context, page, cdp } = await visit(browser);
   try {
     await cdp.send('Emulation.setCPUThrottlingRate', { rate: THROTTLING });
     await openQuickLook(page, url);
+    await page.waitForLoadState('networkidle');
     return await measure(page, '9.6');
   } finally {
     await context.close();
