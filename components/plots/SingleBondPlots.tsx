@@ -143,7 +143,7 @@ const styles = StyleSheet.create({
   ruled: { borderTopWidth: border.hair, borderTopColor: color.ruleSoft },
   // wraps to one below the other where the two do not fit
   beside: { flexDirection: 'row', flexWrap: 'wrap' },
-  narrow: { flexGrow: 1, flexBasis: 232 },
-  broad: { flexGrow: 2, flexBasis: 300, borderTopWidth: 0 },
+  narrow: { flexGrow: 1, flexShrink: 1, flexBasis: 232, minWidth: 0 },
+  broad: { flexGrow: 2, flexShrink: 1, flexBasis: 300, minWidth: 0, borderTopWidth: 0 },
   tables: { gap: space.lg, paddingBottom: space.md },
 });

@@ -30,7 +30,7 @@ beforeEach(() => {
   asked = [];
   window.sessionStorage.clear();
   window.history.replaceState(null, '', '/');
-  globalThis.fetch = (path, init) => (isAway ? Promise.reject(new TypeError('Failed to fetch')) : Promise.resolve(answer(path instanceof Request ? path.url : path.toString(), typeof init?.body === 'string' ? init.body : '')));
+  globalThis.fetch = (path, init) => (isAway ? Promise.reject(new TypeError('Failed to fetch')) : Promise.resolve(answer(typeof path === 'string' ? path : 'url' in path ? path.url : path.href, typeof init?.body === 'string' ? init.body : '')));
 });
 
 function open(search = '') {
