@@ -42,6 +42,7 @@ export function securityHeaders({ behindTls }: { behindTls: boolean }): RequestH
   if (!whole) throw new Error('The security headers could not be made.');
   for (const [name, value] of Object.entries(recorder.getHeaders())) headers.push([name, String(value)]);
   return (_request, response, next) => {
+    response.removeHeader('X-Powered-By'); // Express names itself unless told not to
     for (const [name, value] of headers) response.setHeader(name, value);
     next();
   };
